@@ -1,0 +1,5 @@
+export * from './quantity'
+export * from './controls'
+export * from './preamp'
+export * from './inputs'
+export * from './result'
