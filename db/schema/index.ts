@@ -1,0 +1,2 @@
+/** Every table, in one object: Drizzle wants it so. One line a domain. */
+export * from './meta'
