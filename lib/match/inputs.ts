@@ -20,8 +20,8 @@ export interface Cartridge {
   outputVolts: Quantity
   coilOhms: Quantity
   coilHenries: Quantity
-  /** The maker's recommended load, null where none is printed; high may be Infinity ("100 Ω or more"). */
-  recommendedLoadOhms: { low: number; high: number } | null
+  /** The maker's recommended load, null where none is printed; high is null for "100 Ω or more". */
+  recommendedLoadOhms: { low: number; high: number | null } | null
   /** The maker's recommended total capacitance, null where none is printed. */
   recommendedFarads: { low: number; high: number } | null
   massKilograms: Quantity

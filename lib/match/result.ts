@@ -166,6 +166,7 @@ export type Remedy =
   | { kind: 'other-input'; pathId: 'mm' | 'mc' }
   | { kind: 'step-up'; ratioLow: number; ratioHigh: number }
   | { kind: 'without-step-up' }
+  | { kind: 'line-input' }
   | { kind: 'load-plug'; ohms: number }
   | { kind: 'lead'; farads: number }
   | { kind: 'other-model'; needs: 'gain' | 'load' | 'magnet-input' | 'voltage-input' | 'room' }
