@@ -1,11 +1,12 @@
 import type { Draws } from './draws'
-import { ENVELOPES } from './rules'
 import type { FigureBench } from './figure-draws'
-import { allowedAt1kHz, allowedFactor, envelopeOverNominal, filterPower } from './frequency-tables'
+import { envelopeOverNominal, filterPower, inputLimit } from './frequency-tables'
 import { deviationDecibels, type NetworkDraws } from './network-draws'
 import type { Setting } from './preamp'
-import type { Curves } from './result'
+import type { Curves, RecordLevel } from './result'
+import { armResponseDecibels } from './physics/arm'
 import { logSpacedHertz } from './physics/grid'
+import { allowedInputVolts } from './physics/overload'
 
 /** Points of each plotted curve. */
 const POINTS = 121
@@ -47,7 +48,9 @@ export function curvesOf(bench: FigureBench, setting: Setting): Curves {
   const loud = roomAt(draws, setting, network, figures.inputVolts, 'loud')
   const extreme = roomAt(draws, setting, network, figures.inputVolts, 'extreme')
   const resonance = figures.armResonanceHertz as Float64Array
-  const arm = band(armHertz, count, (i, hertz) => armDecibels(hertz, resonance[i]))
+  const arm = band(armHertz, count, (i, hertz) =>
+    armResponseDecibels({ hertz, resonanceHertz: resonance[i], qualityFactor: ARM_QUALITY }),
+  )
   return {
     loading: { hertz: [...loadingHertz], ...band(loadingHertz, count, (i, hertz) => deviationDecibels(network, i, hertz)) },
     room: { hertz: [...roomHertz], ...band(roomHertz, count, loud), extremeLow: band(roomHertz, count, extreme).low },
@@ -60,23 +63,15 @@ export function curvesOf(bench: FigureBench, setting: Setting): Curves {
 }
 
 /** Room of the preamp above the record's envelope at a frequency, dB. */
-function roomAt(draws: Draws, setting: Setting, network: NetworkDraws, inputVolts: Float64Array, level: keyof typeof ENVELOPES) {
-  const { topology, iecBass } = draws.inputs.preamp
-  const allowed = allowedAt1kHz(setting.gain.overload, topology, iecBass)
+function roomAt(draws: Draws, setting: Setting, network: NetworkDraws, inputVolts: Float64Array, level: RecordLevel) {
+  const limit = inputLimit(draws.inputs.preamp, setting.gain)
   const shape = new Map<number, number>()
   return (i: number, hertz: number) => {
     let stage = shape.get(hertz)
     if (stage === undefined) {
-      const factor = allowedFactor(hertz, topology, iecBass, setting.gain.overload)
-      stage = 20 * Math.log10((allowed * factor) / envelopeOverNominal(hertz, level))
+      stage = 20 * Math.log10(allowedInputVolts(limit, hertz) / envelopeOverNominal(hertz, level))
       shape.set(hertz, stage)
     }
     return stage - 20 * Math.log10(inputVolts[i]) - deviationDecibels(network, i, hertz)
   }
-}
-
-/** How strongly the arm passes a frequency: x²/|1 − x² + jx/Q|, x = f/f₀. @returns dB */
-function armDecibels(hertz: number, resonanceHertz: number): number {
-  const x = hertz / resonanceHertz
-  return 20 * Math.log10((x * x) / Math.hypot(1 - x * x, x / ARM_QUALITY))
 }

@@ -1,17 +1,10 @@
 import type { Draws } from './draws'
 import { rangeOf, spread } from './ensemble'
-import {
-  allowedAt1kHz,
-  allowedFactor,
-  allowedOverReference,
-  demandTable,
-  filterPower,
-  marginGrid,
-  noiseTable,
-  type Demand,
-} from './frequency-tables'
+import { demandTable, equalisedLimit, filterPower, inputLimit, marginGrid, noiseTable, type Demand } from './frequency-tables'
+import { allowedInputVolts } from './physics/overload'
 import { deviationDecibels, drawNetwork, noiseDraws, stepUpOf, tallest, type NetworkDraws, type NoiseDraws, type Tallest } from './network-draws'
 import { angular } from './physics/constants'
+import { DIGITAL_SOURCE_VOLTS } from './physics/level'
 import { playbackPower } from './physics/riaa'
 import type { Filter } from './controls'
 import type { GainOption, Setting } from './preamp'
@@ -28,7 +21,6 @@ export type Depth = 'quick' | 'full'
 const MARGIN_POINTS = { quick: 40, full: 120 } as const
 const NOISE_POINTS = { quick: 24, full: 48 } as const
 
-const DIGITAL_VOLTS = 2
 const W2_AT = { low: angular(1000) ** 2, high: angular(15_000) ** 2, cable: angular(20_000) ** 2 }
 
 /** 20·log10 of an array's values, each through `of`. */
@@ -81,11 +73,14 @@ export class FigureBench {
     const key = [shape, own, level, filterKey].join(' ')
     let known = this.demands.get(key)
     if (!known) {
-      known = demandTable(marginGrid(MARGIN_POINTS[this.depth], level), level, (hertz) => {
-        if (stage === 'input') return allowedFactor(hertz, preamp.topology, preamp.iecBass, gain.overload)
-        const allowed = allowedOverReference(hertz, 'output-limited', preamp.iecBass)
-        return stage === 'next' ? allowed / Math.sqrt(filterPower(hertz, filter)) : allowed
-      })
+      const limit = stage === 'input' ? inputLimit(preamp, gain) : equalisedLimit(preamp)
+      const at1kHz = allowedInputVolts(limit, 1000)
+      const behind = stage === 'next' ? filter : null
+      known = demandTable(
+        marginGrid(MARGIN_POINTS[this.depth], level),
+        level,
+        (hertz) => allowedInputVolts(limit, hertz) / at1kHz / Math.sqrt(filterPower(hertz, behind)),
+      )
       this.demands.set(key, known)
     }
     return known
@@ -106,7 +101,7 @@ export class FigureBench {
     const { preamp } = this.draws.inputs
     const count = inputVolts.length
     const input = this.peaks(setting, this.demand('input', setting.gain, level, null))
-    const allowed = allowedAt1kHz(setting.gain.overload, preamp.topology, preamp.iecBass)
+    const allowed = allowedInputVolts(inputLimit(preamp, setting.gain), 1000)
     const margin = each(count, (i) => 20 * Math.log10(allowed / inputVolts[i]) - 10 * Math.log10(input.power[i]))
     const hertz = input.hertz.slice()
     if (preamp.topology !== 'output-limited') {
@@ -139,7 +134,7 @@ export class FigureBench {
       count,
       (i) => (openVolts[i] * doubling * values.nextResistance[i]) / (values.nextResistance[i] + values.outputResistance[i]),
     )
-    const allowed = allowedAt1kHz(setting.gain.overload, inputs.preamp.topology, inputs.preamp.iecBass)
+    const allowed = allowedInputVolts(inputLimit(inputs.preamp, setting.gain), 1000)
     const preampLoud = this.preampMargin(setting, 'loud', inputVolts, openVolts)
     const next = this.peaks(setting, this.demand('next', setting.gain, 'loud', setting.filter))
     const table = noiseTable(inputs.preamp.iecBass, NOISE_POINTS[this.depth])
@@ -179,7 +174,7 @@ export class FigureBench {
     return {
       snrFlatDecibels,
       outputDecibelVolts: decibels(count, (i) => outputVolts[i]),
-      outputReDigitalDecibels: decibels(count, (i) => outputVolts[i] / DIGITAL_VOLTS),
+      outputReDigitalDecibels: decibels(count, (i) => outputVolts[i] / DIGITAL_SOURCE_VOLTS),
       levelLossDecibels: each(count, (i) => 10 * Math.log10(network.at1kHz[i])),
       extremeMarginDecibels: extreme.margin,
       at10kHzDecibels: each(count, (i) => deviationDecibels(network, i, 10_000)),

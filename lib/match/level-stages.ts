@@ -1,13 +1,13 @@
-import { rangeOf } from './ensemble'
+import { rangeOf, spread } from './ensemble'
 import type { FigureBench, FigureDraws } from './figure-draws'
-import { spread } from './ensemble'
 import type { Setting } from './preamp'
 import type { Range } from './quantity'
 import type { LevelStage } from './result'
-import { ENVELOPES, GROOVE_NOISE_DECIBELS, NOMINAL_VELOCITY } from './rules'
+import { envelopeOverNominal } from './frequency-tables'
+import { GROOVE_NOISE_DECIBELS } from './rules'
 
-/** How far loud records peak over nominal level, dB. */
-export const LOUD_PEAK_DECIBELS = 20 * Math.log10(ENVELOPES.loud.velocity / NOMINAL_VELOCITY)
+/** How far loud records peak over nominal level where velocity limits them, dB. */
+export const LOUD_PEAK_DECIBELS = 20 * Math.log10(envelopeOverNominal(2000, 'loud'))
 
 const shifted = (range: Range, by: number): Range => ({ low: range.low + by, nominal: range.nominal + by, high: range.high + by })
 const times = (range: Range, factor: number): Range => ({ low: range.low * factor, nominal: range.nominal * factor, high: range.high * factor })

@@ -1,4 +1,4 @@
-import type { RecordLevel, Weight } from './result'
+import type { Weight } from './result'
 
 /**
  * The thresholds of every judgement, in one place, with their reasons. Changing one here raises `RULES_VERSION`,
@@ -107,19 +107,6 @@ export const SHARE_THAT_COUNTS = 0.1
 
 /** Least S/N the groove itself gives, re 5 cm/s peak, A-weighted. Practical value, memory. */
 export const GROOVE_NOISE_DECIBELS = 58
-
-/**
- * What records are taken to reach. Velocity peaks are lateral, m/s; amplitude metres; acceleration in g.
- * 25 cm/s after Holman; 50 cm/s and 5000 g after Lesurf; the middle one is ours between them.
- */
-export const ENVELOPES: Record<RecordLevel, { velocity: number; amplitude: number; accelerationG: number }> = {
-  ordinary: { velocity: 0.25, amplitude: 50e-6, accelerationG: 3000 },
-  loud: { velocity: 0.38, amplitude: 50e-6, accelerationG: 4000 },
-  extreme: { velocity: 0.5, amplitude: 50e-6, accelerationG: 5000 },
-}
-
-/** Nominal level: 5 cm/s peak lateral, m/s. */
-export const NOMINAL_VELOCITY = 0.05
 
 export const WEIGHT_ORDER: Record<Weight, number> = { fine: 0, 'worth-knowing': 1, limit: 2, 'rules-it-out': 3 }
 const BY_ORDER: Weight[] = ['fine', 'worth-knowing', 'limit', 'rules-it-out']
