@@ -9,8 +9,17 @@ let made: Logger | undefined
 
 /** One JSON object a line, on standard output. */
 export function log(): Logger {
-  made ??= pino({ level: env().logLevel, redact: { paths: HIDDEN, censor: '(hidden)' }, base: undefined })
+  made ??= pino({ level: chosenLevel(), redact: { paths: HIDDEN, censor: '(hidden)' }, base: undefined })
   return made
+}
+
+/** Trouble with the settings has to reach the log too, so wrong settings do not stop it. */
+function chosenLevel(): string {
+  try {
+    return env().logLevel
+  } catch {
+    return 'info'
+  }
 }
 
 /** A path with the code of a sheet taken out: whoever has the code can read the sheet. */

@@ -1,0 +1,21 @@
+'use client'
+
+import { usePathname } from 'next/navigation'
+import { PlaceLink } from './place-link'
+
+const PLACES = [{ path: '/check', words: 'Check a cartridge' }]
+
+/** The places one can go, with the present one marked. */
+export function MainNav() {
+  const here = usePathname()
+  const marked = (path: string) => (here === path ? 'page' : here.startsWith(`${path}/`) ? 'true' : undefined)
+  return (
+    <nav aria-label="Main">
+      {PLACES.map(({ path, words }) => (
+        <PlaceLink key={path} href={path} aria-current={marked(path)}>
+          {words}
+        </PlaceLink>
+      ))}
+    </nav>
+  )
+}
