@@ -36,5 +36,6 @@ export default defineConfig({
     timeout: 60_000,
     reuseExistingServer: false,
     stdout: 'ignore',
+    gracefulShutdown: { signal: 'SIGTERM', timeout: 5000 },
   },
 })
