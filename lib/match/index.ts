@@ -8,3 +8,7 @@ export { ENGINE_VERSION, RULES_VERSION, GROOVE_NOISE_DECIBELS, AT_LEAST, INSIDE 
 export { LOUD_PEAK_DECIBELS } from './level-stages'
 export { RECORD_ENVELOPES } from './physics/record-envelope'
 export { match, tryOut } from './match'
+export { clashIn, resolveSetting, summarise } from './settings'
+export { decodeState, encodeState, enumerateStates, parseState, statesEqual } from './states'
+export { flip, isPerSide, movesBetween, sidesDiffer } from './moves'
+export { describeGroup, describeSetting, faradsInWords, gainInWords, ohmsInWords } from './setting-words'

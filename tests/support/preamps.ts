@@ -38,8 +38,8 @@ const path = (id: 'mm' | 'mc', ohms = 47_000, farads = 70e-12): Preamp['paths'][
 export function bankPreamp(): Preamp {
   return {
     ...base,
-    modelId: 'finch-2',
-    modelName: 'Finch 2',
+    modelId: 'bank-model',
+    modelName: 'Bank model',
     controls: [{ kind: 'bank', id: 'bank', label: 'Switches', place: 'back', switchCount: 8 }],
     groups: [
       {
@@ -82,8 +82,8 @@ export function bankPreamp(): Preamp {
 export function plugPreamp(): Preamp {
   return {
     ...base,
-    modelId: 'heron-4',
-    modelName: 'Heron 4',
+    modelId: 'plug-model',
+    modelName: 'Plug model',
     controls: [
       {
         kind: 'plugs',
@@ -138,8 +138,8 @@ export function plugPreamp(): Preamp {
 export function buttonPreamp(): Preamp {
   return {
     ...base,
-    modelId: 'crane-3',
-    modelName: 'Crane 3',
+    modelId: 'button-model',
+    modelName: 'Button model',
     technology: 'valve',
     controls: [
       {
@@ -202,8 +202,8 @@ export function buttonPreamp(): Preamp {
 export function mixedPreamp(): Preamp {
   return {
     ...base,
-    modelId: 'plover-7',
-    modelName: 'Plover 7',
+    modelId: 'mixed-model',
+    modelName: 'Mixed model',
     controls: [
       { kind: 'bank', id: 'six', label: 'Switches', place: 'back', switchCount: 6 },
       {
@@ -270,8 +270,8 @@ export function mixedPreamp(): Preamp {
 export function fixedPreamp(): Preamp {
   return {
     ...base,
-    modelId: 'wren-1',
-    modelName: 'Wren 1',
+    modelId: 'fixed-model',
+    modelName: 'Fixed model',
     controls: [],
     groups: [],
     asDelivered: {},
