@@ -59,8 +59,8 @@ function pointsOf(count: number, with7950: boolean): NoisePoints {
   const known = kept.get(key)
   if (known) return known
   const { hertz, weightHertz } = logQuadrature({ low: AUDIO_LOW_HERTZ, high: AUDIO_HIGH_HERTZ, count })
-  const flat = weightHertz.map((weight, i) => weight * playbackPower(hertz[i] ?? 0, { with7950 }))
-  const aWeighted = flat.map((weight, i) => weight * aWeightingPower(hertz[i] ?? 0))
+  const flat = weightHertz.map((weight, i) => weight * playbackPower(hertz[i], { with7950 }))
+  const aWeighted = flat.map((weight, i) => weight * aWeightingPower(hertz[i]))
   const points = { hertz, flat, aWeighted }
   kept.set(key, points)
   return points

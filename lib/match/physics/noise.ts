@@ -56,9 +56,9 @@ export function noiseIntegrals(network: NoiseNetwork, { with7950 = false }: Play
   let impedanceFlat = 0
   let impedanceA = 0
   for (let i = 0; i < points.hertz.length; i += 1) {
-    const hertz = points.hertz[i] ?? 0
-    const flat = points.flat[i] ?? 0
-    const aWeighted = points.aWeighted[i] ?? 0
+    const hertz = points.hertz[i]
+    const flat = points.flat[i]
+    const aWeighted = points.aWeighted[i]
     let resistance: number
     let impedanceSquared: number
     if (exact) {

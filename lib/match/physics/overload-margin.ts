@@ -70,7 +70,7 @@ export function worstMargin(chain: OverloadChain): WorstMargin {
     if (decibels < best.decibels) best = { hertz, decibels }
     return decibels
   }
-  for (let i = 0; i < GRID.length; i += 1) look(GRID[i] ?? AUDIO_LOW_HERTZ)
+  for (let i = 0; i < GRID.length; i += 1) look(GRID[i])
   for (const hertz of namedFrequencies(chain)) {
     if (hertz > AUDIO_LOW_HERTZ && hertz < AUDIO_HIGH_HERTZ) look(hertz)
   }
