@@ -89,6 +89,9 @@ export const ComplianceField = z
   .refine(hasEnds, NEEDS_END)
   .refine(inOrder, MUST_RISE)
 
+/** Leaflet lines that are held against what is usual for the type. */
+export const HELD_FIELDS = ['outputMillivolts', 'coilOhms', 'inductanceMillihenries', 'loadOhms', 'loadPicofarads'] as const
+
 export const CartridgeEntry = z.strictObject({
   id: EntryId,
   maker: Words,
@@ -113,8 +116,8 @@ export const CartridgeEntry = z.strictObject({
   stylus: Words.nullable(),
   /** Sentences the leaflet adds that a check cannot compute with. */
   notes: z.array(Words),
-  /** Why a figure lies outside what is usual for the type; null where all are usual. */
-  odd: Words.nullable(),
+  /** Why a figure lies outside what is usual for the type, by its field. */
+  odd: z.partialRecord(z.enum(HELD_FIELDS), Words),
 })
 export type CartridgeEntry = z.infer<typeof CartridgeEntry>
 
