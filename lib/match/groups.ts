@@ -62,7 +62,9 @@ export function keyOf(preamp: Preamp, group: Group, state: ControlState): string
   const control = controlOf(preamp, group.control)
   const stand = standOf(preamp, state, control)
   if (!hasBits(control) || !group.members) return stand
-  return group.members.map((member) => stand[member - 1]).join('')
+  let key = ''
+  for (const member of group.members) key += stand[member - 1]
+  return key
 }
 
 /** True when the group does something: the group it waits for, if any, does something and stands at one of the options. */

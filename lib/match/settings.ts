@@ -27,13 +27,15 @@ export function added(parts: Quantity[]): Quantity {
 
 /** The first pair of members that stand ON together and must not; null when there is none. */
 export function clashIn(preamp: Preamp, state: ControlState): Exclusion | null {
-  const clash = preamp.exclusions.find(({ control, members }) => members.every((member) => state[control]?.[member - 1] === '1'))
+  const stands = (control: string, member: number) => state[control]?.[member - 1] === '1'
+  const clash = preamp.exclusions.find(({ control, members: [one, other] }) => stands(control, one) && stands(control, other))
   return clash ?? null
 }
 
 /** What a choice group stands at; undefined at a place it says nothing about. */
 function chosenIn<T>(preamp: Preamp, group: Group, options: Record<string, T>, state: ControlState): T | undefined {
-  return Object.hasOwn(options, keyOf(preamp, group, state)) ? options[keyOf(preamp, group, state)] : undefined
+  const key = keyOf(preamp, group, state)
+  return Object.hasOwn(options, key) ? options[key] : undefined
 }
 
 /**
@@ -63,6 +65,20 @@ function undescribed(preamp: Preamp, group: Group, state: ControlState): Exclusi
  * @throws when the state leaves out a control or holds what it cannot stand at
  */
 export function resolveSetting(preamp: Preamp, state: ControlState): Setting | { clash: Exclusion } {
+  const way = wayThrough(preamp, state)
+  if ('clash' in way) return way
+  const { path, gain, active } = way
+  return { path, gain, ...acrossInput(preamp, active, state, path) }
+}
+
+/**
+ * The input and the gain in use, with the groups that do something: a setting without what stands across the input.
+ * Cheap, for going through every combination.
+ */
+export function wayThrough(
+  preamp: Preamp,
+  state: ControlState,
+): { path: InputPath; gain: GainOption; active: Group[] } | { clash: Exclusion } {
   const clash = clashIn(preamp, state)
   if (clash) return { clash }
   const active = preamp.groups.filter((group) => isActive(preamp, group, state))
@@ -71,13 +87,11 @@ export function resolveSetting(preamp: Preamp, state: ControlState): Setting | {
       group.how === 'choice' && hasBits(controlOf(preamp, group.control)) && !Object.hasOwn(group.options, keyOf(preamp, group, state)),
   )
   if (missing) return { clash: undescribed(preamp, missing, state) }
-  const way = wayThrough(preamp, active, state)
-  if ('clash' in way) return way
-  return { ...way, ...acrossInput(preamp, active, state, way.path) }
+  const way = inputAndGain(preamp, active, state)
+  return 'clash' in way ? way : { ...way, active }
 }
 
-/** The input and the gain in use. */
-function wayThrough(
+function inputAndGain(
   preamp: Preamp,
   active: Group[],
   state: ControlState,

@@ -1,7 +1,7 @@
 import type { Control, ControlState, Group } from './controls'
-import { canStandAt, controlOf, hasBits, isActive, keyOf, memberCount, membersOf, placesOf } from './groups'
+import { canStandAt, hasBits, keyOf, memberCount, membersOf, placesOf } from './groups'
 import type { Preamp } from './preamp'
-import { resolveSetting } from './settings'
+import { resolveSetting, wayThrough } from './settings'
 
 /** True when every control stands the same. */
 export function statesEqual(a: ControlState, b: ControlState): boolean {
@@ -59,12 +59,10 @@ function standsOf(preamp: Preamp, control: Control, held: string): string[] {
 
 /** What a state comes to, as a text that two states share when they come to the same thing; null when it is not real. */
 function meaningOf(preamp: Preamp, state: ControlState): string | null {
-  const setting = resolveSetting(preamp, state)
-  if ('clash' in setting) return null
-  const switched = preamp.groups
-    .filter((group) => isComputed(group) && isActive(preamp, group, state))
-    .map((group) => `${group.id}=${keyOf(preamp, group, state)}`)
-  return [setting.path.id, setting.gain.id, ...switched].join(' ')
+  const way = wayThrough(preamp, state)
+  if ('clash' in way) return null
+  const switched = way.active.filter(isComputed).map((group) => `${group.id}=${keyOf(preamp, group, state)}`)
+  return [way.path.id, way.gain.id, ...switched].join(' ')
 }
 
 /** Input and gain are told by what they come to; the rest by how its switches stand. */
@@ -75,12 +73,12 @@ function isComputed(group: Group): boolean {
 /** How many switches, places, plugs or buttons stand otherwise. */
 function differences(preamp: Preamp, a: ControlState, b: ControlState): number {
   let count = 0
-  for (const { id } of preamp.controls) {
-    const from = a[id]
-    const to = b[id] ?? ''
+  for (const control of preamp.controls) {
+    const from = a[control.id]
+    const to = b[control.id] ?? ''
     if (from === to) continue
-    const control = controlOf(preamp, id)
-    count += hasBits(control) ? [...from].filter((bit, index) => bit !== to[index]).length : 1
+    if (!hasBits(control)) count++
+    else for (let bit = 0; bit < from.length; bit++) if (from[bit] !== to[bit]) count++
   }
   return count
 }
