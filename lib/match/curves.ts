@@ -1,10 +1,12 @@
 import type { Draws } from './draws'
-import type { FigureBench } from './figure-draws'
+import type { FigureBench, FigureDraws } from './figure-draws'
 import { envelopeOverNominal, filterPower, inputLimit } from './frequency-tables'
-import { deviationDecibels, type NetworkDraws } from './network-draws'
+import type { NetworkDraws } from './network-draws'
 import type { Setting } from './preamp'
 import type { Curves, RecordLevel } from './result'
-import { armResponseDecibels } from './physics/arm'
+import { armResponsePower } from './physics/arm'
+import { angular } from './physics/constants'
+import { powerToDecibels } from './physics/decibels'
 import { logSpacedHertz } from './physics/grid'
 import { allowedInputVolts } from './physics/overload'
 
@@ -15,63 +17,66 @@ const ARM_QUALITY = 2
 
 type Band = { low: number[]; nominal: number[]; high: number[] }
 
-/** A figure at each frequency over all draws. */
-function band(hertz: Float64Array, count: number, value: (i: number, hertz: number) => number): Band {
-  const low: number[] = []
-  const nominal: number[] = []
-  const high: number[] = []
+/** A power ratio at each frequency over all draws, in decibels; the logarithm is taken last, of three values only. */
+function band(hertz: Float64Array, count: number, powerAt: (hertz: number) => (i: number) => number): Band {
+  const result: Band = { low: [], nominal: [], high: [] }
   for (const f of hertz) {
-    const middle = value(0, f)
+    const power = powerAt(f)
+    const middle = power(0)
     let least = middle
     let most = middle
     for (let i = 1; i < count; i++) {
-      const v = value(i, f)
-      if (v < least) least = v
-      else if (v > most) most = v
+      const value = power(i)
+      if (value < least) least = value
+      else if (value > most) most = value
     }
-    low.push(least)
-    nominal.push(middle)
-    high.push(most)
+    result.low.push(powerToDecibels(least))
+    result.nominal.push(powerToDecibels(middle))
+    result.high.push(powerToDecibels(most))
   }
-  return { low, nominal, high }
+  return result
 }
 
 /** The three plotted responses of a setting: treble, room at each pitch, arm. */
-export function curvesOf(bench: FigureBench, setting: Setting): Curves {
-  const { draws } = bench
+export function curvesOf(bench: FigureBench, setting: Setting, figures: FigureDraws): Curves {
   const { network } = bench.network(setting)
-  const count = network.count
+  const { count } = network
   const loadingHertz = logSpacedHertz({ low: 100, high: 40_000, count: POINTS })
   const roomHertz = logSpacedHertz({ low: 20, high: 20_000, count: POINTS })
   const armHertz = logSpacedHertz({ low: 2, high: 60, count: POINTS })
-  const figures = bench.figures(setting)
-  const loud = roomAt(draws, setting, network, figures.inputVolts, 'loud')
-  const extreme = roomAt(draws, setting, network, figures.inputVolts, 'extreme')
-  const resonance = figures.armResonanceHertz as Float64Array
-  const arm = band(armHertz, count, (i, hertz) =>
-    armResponseDecibels({ hertz, resonanceHertz: resonance[i], qualityFactor: ARM_QUALITY }),
-  )
+  const room = (level: RecordLevel) => band(roomHertz, count, roomPower(bench.draws, setting, network, figures.inputVolts, level))
+  const arm = band(armHertz, count, armPower(figures.armResonanceHertz as Float64Array))
   return {
-    loading: { hertz: [...loadingHertz], ...band(loadingHertz, count, (i, hertz) => deviationDecibels(network, i, hertz)) },
-    room: { hertz: [...roomHertz], ...band(roomHertz, count, loud), extremeLow: band(roomHertz, count, extreme).low },
+    loading: { hertz: [...loadingHertz], ...band(loadingHertz, count, loadingPower(network)) },
+    room: { hertz: [...roomHertz], ...room('loud'), extremeLow: room('extreme').low },
     arm: {
       hertz: [...armHertz],
       ...arm,
-      filtered: setting.filter ? arm.nominal.map((value, k) => value + 10 * Math.log10(filterPower(armHertz[k], setting.filter))) : null,
+      filtered: setting.filter ? arm.nominal.map((value, k) => value + powerToDecibels(filterPower(armHertz[k], setting.filter))) : null,
     },
   }
 }
 
-/** Room of the preamp above the record's envelope at a frequency, dB. */
-function roomAt(draws: Draws, setting: Setting, network: NetworkDraws, inputVolts: Float64Array, level: RecordLevel) {
-  const limit = inputLimit(draws.inputs.preamp, setting.gain)
-  const shape = new Map<number, number>()
-  return (i: number, hertz: number) => {
-    let stage = shape.get(hertz)
-    if (stage === undefined) {
-      stage = 20 * Math.log10(allowedInputVolts(limit, hertz) / envelopeOverNominal(hertz, level))
-      shape.set(hertz, stage)
-    }
-    return stage - 20 * Math.log10(inputVolts[i]) - deviationDecibels(network, i, hertz)
+/** |H|² re 1 kHz. */
+function loadingPower({ d0, d1, d2, at1kHz }: NetworkDraws) {
+  return (hertz: number) => {
+    const w = angular(hertz) ** 2
+    return (i: number) => at1kHz[i] / (d0[i] + w * (d1[i] + w * d2[i]))
   }
+}
+
+/** What the preamp allows over what the record's envelope asks for, squared. */
+function roomPower(draws: Draws, setting: Setting, network: NetworkDraws, inputVolts: Float64Array, level: RecordLevel) {
+  const limit = inputLimit(draws.inputs.preamp, setting.gain)
+  const response = loadingPower(network)
+  return (hertz: number) => {
+    const allowed = (allowedInputVolts(limit, hertz) / envelopeOverNominal(hertz, level)) ** 2
+    const at = response(hertz)
+    return (i: number) => allowed / (inputVolts[i] * inputVolts[i] * at(i))
+  }
+}
+
+/** How strongly the arm passes a frequency, as a power ratio. */
+function armPower(resonanceHertz: Float64Array) {
+  return (hertz: number) => (i: number) => armResponsePower({ hertz, resonanceHertz: resonanceHertz[i], qualityFactor: ARM_QUALITY })
 }

@@ -7,6 +7,8 @@ import { angular } from './physics/constants'
 import { DIGITAL_SOURCE_VOLTS } from './physics/level'
 import { playbackPower } from './physics/riaa'
 import type { Filter } from './controls'
+import type { UnknownName } from './inputs'
+import type { Quantity } from './quantity'
 import type { GainOption, Setting } from './preamp'
 import type { FigureName, Figures } from './result'
 
@@ -42,6 +44,7 @@ function each(count: number, of: (i: number) => number): Float64Array {
 export class FigureBench {
   private readonly networks = new Map<string, { network: NetworkDraws; noise: NoiseDraws; peaks: Map<Demand, Tallest> }>()
   private readonly demands = new Map<string, Demand>()
+  private readonly spreads = new Map<Quantity, Float64Array>()
   private readonly outside: Partial<Record<FigureName, Float64Array>>
 
   constructor(
@@ -60,6 +63,16 @@ export class FigureBench {
       const noise = noiseDraws(network, table, this.draws.inputs.temperatureKelvin)
       known = { network, noise, peaks: new Map() }
       this.networks.set(key, known)
+    }
+    return known
+  }
+
+  /** The draws of one of the preamp's own quantities; settings share them. */
+  private drawn(quantity: Quantity, name: UnknownName): Float64Array {
+    let known = this.spreads.get(quantity)
+    if (!known) {
+      known = spread(quantity, name, this.draws.ensemble)
+      this.spreads.set(quantity, known)
     }
     return known
   }
@@ -121,12 +134,12 @@ export class FigureBench {
   /** All figures of a setting; those that only a sheet shows are null at `quick` depth. */
   figures(setting: Setting): FigureDraws {
     const { draws } = this
-    const { values, inputs, ensemble } = draws
+    const { values, inputs } = draws
     const { network, noise } = this.network(setting)
     const { count } = network
-    const gain = spread(setting.gain.gainDecibels, 'gain', ensemble)
-    const en = spread(setting.gain.voltageNoise, 'voltageNoise', ensemble)
-    const iN = spread(setting.gain.currentNoise, 'currentNoise', ensemble)
+    const gain = this.drawn(setting.gain.gainDecibels, 'gain')
+    const en = this.drawn(setting.gain.voltageNoise, 'voltageNoise')
+    const iN = this.drawn(setting.gain.currentNoise, 'currentNoise')
     const doubling = inputs.output === 'balanced' && inputs.preamp.hasBalancedOutput ? 2 : 1
     const inputVolts = each(count, (i) => network.emfVolts[i] / Math.sqrt(network.at1kHz[i]))
     const openVolts = each(count, (i) => inputVolts[i] * 10 ** (gain[i] / 20))
@@ -166,7 +179,7 @@ export class FigureBench {
     const { count } = network
     const inputVolts = quick.inputVolts as Float64Array
     const outputVolts = quick.outputVolts as Float64Array
-    const gain = spread(setting.gain.gainDecibels, 'gain', draws.ensemble)
+    const gain = this.drawn(setting.gain.gainDecibels, 'gain')
     const openVolts = each(count, (i) => inputVolts[i] * 10 ** (gain[i] / 20))
     const extreme = this.preampMargin(setting, 'extreme', inputVolts, openVolts)
     const arm = quick.armResonanceHertz as Float64Array
@@ -175,7 +188,7 @@ export class FigureBench {
       snrFlatDecibels,
       outputDecibelVolts: decibels(count, (i) => outputVolts[i]),
       outputReDigitalDecibels: decibels(count, (i) => outputVolts[i] / DIGITAL_SOURCE_VOLTS),
-      levelLossDecibels: each(count, (i) => 10 * Math.log10(network.at1kHz[i])),
+      levelLossDecibels: each(count, (i) => -10 * Math.log10(network.at1kHz[i])),
       extremeMarginDecibels: extreme.margin,
       at10kHzDecibels: each(count, (i) => deviationDecibels(network, i, 10_000)),
       at15kHzDecibels: each(count, (i) => deviationDecibels(network, i, 15_000)),

@@ -193,8 +193,8 @@ export function orderThatCounts({ orders, byMiddle }: Judgement): number {
   return 0
 }
 
-/** A judgement as a finding, with the unknown that its doubt comes from most. */
-export function toFinding(judgement: Judgement, draws: Draws): Finding {
+/** A judgement as a finding; with the draws given, also the unknown that its doubt comes from most. */
+export function toFinding(judgement: Judgement, draws: Draws | null): Finding {
   const { orders, values } = judgement
   let worst = 0
   let best = 3
@@ -210,7 +210,7 @@ export function toFinding(judgement: Judgement, draws: Draws): Finding {
     figure: judgement.figure,
     range: values ? rangeOf(values) : null,
     limit: judgement.limit,
-    doubt: values ? leadingUnknown(values, draws) : null,
+    doubt: values && draws ? leadingUnknown(values, draws) : null,
   }
 }
 

@@ -14,7 +14,9 @@ import type { Preamp } from './preamp'
 import { remediesFor } from './remedies'
 import type { Curves, Evaluation, LevelStage, MatchResult, VerdictKind } from './result'
 import { ENGINE_VERSION, RULES_VERSION, SHARE_THAT_COUNTS, WEIGHT_ORDER, weightOf } from './rules'
-import { enumerateStates, movesBetween, sidesDiffer, statesEqual, summarise } from './settings'
+import { movesBetween, sidesDiffer } from './moves'
+import { summarise } from './settings'
+import { enumerateStates, statesEqual } from './states'
 import { reachableShare, verdictOf } from './verdict'
 
 /** Draws that rank every combination, and draws behind the figures of a shown setting. */
@@ -38,9 +40,9 @@ export function match(inputs: MatchInputs): MatchResult {
   const quick = rankStates(inputs, states, { count: QUICK_DRAWS, depth: 'quick', distance })
   const bench = new FigureBench(drawInputs(inputs, FULL_DRAWS), 'full')
   const chosen = candidateOf(bench, quick.candidates[0].state, distance)
-  const standing = present && !sidesDiffer(preamp, present) ? candidateOf(bench, present.left, distance) : null
+  const standing = present && !sidesDiffer(present) ? candidateOf(bench, present.left, distance) : null
   const isWhereItStands = (state: ControlState) =>
-    states.length === 1 || (present !== null && !sidesDiffer(preamp, present) && statesEqual(present.left, state))
+    states.length === 1 || (present !== null && !sidesDiffer(present) && statesEqual(present.left, state))
   const reachable = reachableShare(quick.candidates)
   const verdict = verdictOf(chosen, reachable, !isWhereItStands(chosen.state))
   const doubts = doubtsOf(chosen, bench.draws)
@@ -54,15 +56,15 @@ export function match(inputs: MatchInputs): MatchResult {
     chosen: evaluationOf(chosen, bench),
     present: standing ? evaluationOf(standing, bench) : null,
     moves: present ? movesBetween(preamp, present, chosen.state) : states.length === 1 ? [] : null,
-    presentSidesDiffer: present ? sidesDiffer(preamp, present) : false,
+    presentSidesDiffer: present ? sidesDiffer(present) : false,
     combinations: states.length,
-    others: otherSettings(quick.candidates[0], quick.candidates, quick.bench.draws),
+    others: otherSettings(quick.candidates[0], quick.candidates, preamp),
     remedies: fits ? [] : remediesFor(chosen, bench.draws),
     next: numberToFindNext(inputs, doubts, contenders(quick.candidates), { distance, isWhereItStands }),
     doubts,
     tonight: verdict === 'cannot-say' ? summarise(preamp, gentlest(quick.candidates).state) : null,
-    curves: curvesOf(bench, chosen.setting),
-    presentCurves: standing && !statesEqual(standing.state, chosen.state) ? curvesOf(bench, standing.setting) : null,
+    curves: curvesOf(bench, chosen.setting, chosen.figures),
+    presentCurves: standing && !statesEqual(standing.state, chosen.state) ? curvesOf(bench, standing.setting, standing.figures) : null,
     stages: levelStages(bench, chosen.setting, chosen.figures),
   }
 }
@@ -80,7 +82,7 @@ export function tryOut(inputs: MatchInputs, state: ControlState): {
   return {
     evaluation: evaluationOf(candidate, bench),
     verdict: verdictOf(candidate, reachable, false),
-    curves: curvesOf(bench, candidate.setting),
+    curves: curvesOf(bench, candidate.setting, candidate.figures),
     stages: levelStages(bench, candidate.setting, candidate.figures),
   }
 }
@@ -154,7 +156,7 @@ function closed(inputs: MatchInputs): Omit<MatchResult, 'gate'> {
     chosen: null,
     present: null,
     moves: null,
-    presentSidesDiffer: inputs.present ? sidesDiffer(inputs.preamp, inputs.present) : false,
+    presentSidesDiffer: inputs.present ? sidesDiffer(inputs.present) : false,
     combinations: 0,
     others: [],
     remedies: [],

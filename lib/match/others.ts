@@ -1,13 +1,12 @@
 import type { Candidate } from './candidates'
 import { rangeOf } from './ensemble'
-import type { Draws } from './draws'
 import { orderThatCounts, toFinding, type Judgement } from './judge'
+import type { Preamp } from './preamp'
 import type { OtherSetting } from './result'
 import { summarise } from './settings'
 
 /** Every other combination, neighbours first, each with what decides against it or when it is worth a try. */
-export function otherSettings(chosen: Candidate, candidates: Candidate[], draws: Draws): OtherSetting[] {
-  const { preamp } = draws.inputs
+export function otherSettings(chosen: Candidate, candidates: Candidate[], preamp: Preamp): OtherSetting[] {
   return candidates
     .filter((candidate) => candidate.state !== chosen.state)
     .map((candidate) => {
@@ -18,7 +17,7 @@ export function otherSettings(chosen: Candidate, candidates: Candidate[], draws:
         outputVolts: rangeOf(candidate.figures.outputVolts),
         roomDecibels: rangeOf(tighter(candidate)),
         worthATry: against || distance !== 1 ? null : reasonToTry(candidate, chosen),
-        against: against ? toFinding(against, draws) : null,
+        against: against ? toFinding(against, null) : null,
         distance,
       }
     })

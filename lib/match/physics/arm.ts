@@ -47,8 +47,19 @@ export function highPassDecibels({ hertz, cornerHertz, order }: { hertz: number;
   return -powerToDecibels(1 + (cornerHertz / hertz) ** (2 * order))
 }
 
-/** Response of the cartridge on its arm to what the groove does, 0 dB far above the resonance. @returns dB */
-export function armResponseDecibels({ hertz, resonanceHertz, qualityFactor }: { hertz: number; resonanceHertz: number; qualityFactor: number }): number {
+interface ArmResponse {
+  readonly hertz: number
+  readonly resonanceHertz: number
+  readonly qualityFactor: number
+}
+
+/** Squared response of the cartridge on its arm to what the groove does, 1 far above the resonance. @returns 1 */
+export function armResponsePower({ hertz, resonanceHertz, qualityFactor }: ArmResponse): number {
   const x = (hertz / resonanceHertz) ** 2
-  return powerToDecibels((x * x) / ((1 - x) ** 2 + x / qualityFactor ** 2))
+  return (x * x) / ((1 - x) ** 2 + x / qualityFactor ** 2)
+}
+
+/** The same in decibels, 0 dB far above the resonance. @returns dB */
+export function armResponseDecibels(response: ArmResponse): number {
+  return powerToDecibels(armResponsePower(response))
 }

@@ -24,7 +24,7 @@ export interface NoisePoints {
 }
 
 const COUNTS = [24, 32, 48, 64, 96, 128, 192, 256, 384, 512, 768, 1024, 1536, 2048] as const
-const WANTED_ERROR = 1e-5
+const WANTED_ERROR = 1e-4
 const MIDDLE = Math.log(AUDIO_LOW_HERTZ * AUDIO_HIGH_HERTZ) / 2
 const HALF = Math.log(AUDIO_HIGH_HERTZ / AUDIO_LOW_HERTZ) / 2
 
