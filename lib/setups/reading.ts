@@ -91,11 +91,6 @@ export function readText(text: string, asked: Asked): ReadText {
   else if (BELOW_BEFORE.test(rest) || BELOW_AFTER.test(rest)) open = 'below'
   rest = rest.replace(open === 'above' ? ABOVE_BEFORE : BELOW_BEFORE, '').replace(open === 'above' ? ABOVE_AFTER : BELOW_AFTER, '')
 
-  const range = RANGE.exec(rest)
-  if (range) return readRange(range, asked)
-  const spread = SPREAD.exec(rest)
-  if (spread) return readSpread(spread, asked)
-
   const one = ONE.exec(rest)
   if (one) {
     const value = valueOf(one[1], one[2], asked)
@@ -106,6 +101,10 @@ export function readText(text: string, asked: Asked): ReadText {
     if (open === 'below') figure.low = 0
     return { kind: 'figure', figure }
   }
+  const range = RANGE.exec(rest)
+  if (range) return readRange(range, asked)
+  const spread = SPREAD.exec(rest)
+  if (spread) return readSpread(spread, asked)
   if (/^-\s*[\d.,]/.test(rest)) return { kind: 'not-positive' }
   const inside = ANYWHERE.exec(rest)
   if (!inside) return { kind: 'unreadable', inside: null }
