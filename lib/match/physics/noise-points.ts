@@ -8,7 +8,8 @@
  * | n      | points, error about ρ^(−2n)                                      | 1     | the same          |
  *
  * A sharp resonance brings a pole near the path, 1/(2Q) away in ln f, and asks for more points: their number
- * follows from that distance, so the error stays far below 0.01 dB at any Q up to some hundreds.
+ * follows from that distance. Measured against 40 000 points of the trapezium rule the error stays below 0.002 dB
+ * up to Q = 50 within the band; cartridges stay below 10.
  */
 import { AUDIO_HIGH_HERTZ, AUDIO_LOW_HERTZ } from './constants'
 import { logQuadrature } from './grid'
@@ -24,7 +25,7 @@ export interface NoisePoints {
 }
 
 const COUNTS = [24, 32, 48, 64, 96, 128, 192, 256, 384, 512, 768, 1024, 1536, 2048] as const
-const WANTED_ERROR = 1e-4
+const WANTED_ERROR = 1e-5
 const MIDDLE = Math.log(AUDIO_LOW_HERTZ * AUDIO_HIGH_HERTZ) / 2
 const HALF = Math.log(AUDIO_HIGH_HERTZ / AUDIO_LOW_HERTZ) / 2
 

@@ -36,7 +36,7 @@ export interface WeightedNoiseIntegrals {
   readonly aWeighted: NoiseIntegrals
 }
 
-/** The three integrals, flat and A-weighted, for one network. Accurate to better than 0.001 dB. */
+/** The three integrals, flat and A-weighted, for one network. Accurate to 0.002 dB up to Q = 50. */
 export function noiseIntegrals(network: NoiseNetwork, { with7950 = false }: PlaybackCurve = {}): WeightedNoiseIntegrals {
   const isStepUp = 'turnsRatio' in network
   const loading = isStepUp ? equivalentLoading(network) : network
