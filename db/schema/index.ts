@@ -1,2 +1,3 @@
 /** Every table, in one object: Drizzle wants it so. One line a domain. */
+export * from './catalogue'
 export * from './meta'

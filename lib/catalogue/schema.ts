@@ -80,14 +80,17 @@ export const OutputField = z
   .strictObject({ ...leafletShape, velocity: PrintedVelocity })
   .refine(hasEnds, NEEDS_END)
   .refine(inOrder, MUST_RISE)
+export type OutputField = z.infer<typeof OutputField>
 export const CapacitanceField = z
   .strictObject({ ...leafletShape, means: z.enum(CAPACITANCE_MEANINGS) })
   .refine(hasEnds, NEEDS_END)
   .refine(inOrder, MUST_RISE)
+export type CapacitanceField = z.infer<typeof CapacitanceField>
 export const ComplianceField = z
   .strictObject({ ...leafletShape, measured: z.enum(COMPLIANCE_CONDITIONS) })
   .refine(hasEnds, NEEDS_END)
   .refine(inOrder, MUST_RISE)
+export type ComplianceField = z.infer<typeof ComplianceField>
 
 /** Leaflet lines that are held against what is usual for the type. */
 export const HELD_FIELDS = ['outputMillivolts', 'coilOhms', 'inductanceMillihenries', 'loadOhms', 'loadPicofarads'] as const

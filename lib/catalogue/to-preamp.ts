@@ -72,7 +72,7 @@ function toGain(gain: GainEntry, paths: PathEntry[]): GainOption {
 }
 
 /** The least a cartridge can be loaded with on this board, as its coil sees it: every switch ON, or the lowest plug. */
-function lowestLoadOhms(board: BoardEntry): number {
+export function lowestLoadOhms(board: BoardEntry): number {
   const loads = board.paths.flatMap((path) => {
     const base = path.loadKilohms.nominal * KILO
     const seen = board.groups.flatMap((group) => {
