@@ -2,7 +2,7 @@ import type { ControlState } from './controls'
 import { drawInputs } from './draws'
 import { FigureBench, type Depth, type FigureDraws } from './figure-draws'
 import type { MatchInputs } from './inputs'
-import { judge, orderThatCounts, recommendedLoad, shareFrom, type Judgement } from './judge'
+import { judge, recommendedLoad, shareFrom, type Judgement } from './judge'
 import type { Setting } from './preamp'
 import { SHARE_THAT_COUNTS } from './rules'
 import { resolveSetting } from './settings'
@@ -62,7 +62,7 @@ function worstOrders(judgements: Judgement[], count: number): Uint8Array {
 function rankOf(candidate: Candidate, bench: FigureBench, distance: number): number[] {
   const { judgements, setting, shareRuledOut } = candidate
   const counts = (wanted: (judgement: Judgement) => boolean) => {
-    const orders = judgements.filter(wanted).map(orderThatCounts)
+    const orders = judgements.filter(wanted).map((judgement) => judgement.counts)
     return Math.max(0, ...orders) * 10 + orders.reduce((sum, order) => sum + order, 0)
   }
   const isLevel = ({ code }: Judgement) => code === 'level-low' || code === 'level-high'

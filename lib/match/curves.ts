@@ -39,7 +39,7 @@ function band(hertz: Float64Array, count: number, powerAt: (hertz: number) => (i
 
 /** The three plotted responses of a setting: treble, room at each pitch, arm. */
 export function curvesOf(bench: FigureBench, setting: Setting, figures: FigureDraws): Curves {
-  const { network } = bench.network(setting)
+  const network = bench.network(setting)
   const { count } = network
   const loadingHertz = logSpacedHertz({ low: 100, high: 40_000, count: POINTS })
   const roomHertz = logSpacedHertz({ low: 20, high: 20_000, count: POINTS })

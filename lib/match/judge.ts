@@ -22,6 +22,8 @@ export interface Judgement {
   code: FindingCode
   figure: FigureName | null
   orders: Uint8Array
+  /** The order that counts for the verdict, see `orderThatCounts`. */
+  counts: number
   values: Float64Array | null
   limit: number | null
   /** True for the arm, which is judged by its middle: a limit of the pairing, never of the preamp. */
@@ -32,14 +34,31 @@ export interface Judgement {
 
 type Rule = Partial<Pick<Judgement, 'byMiddle' | 'mustHold' | 'limit'>>
 
+/**
+ * Settings share the arrays of their figures, and with them their judgements: all rules of one check depend on its
+ * inputs only, and an array of figures belongs to one check.
+ */
+const known = new WeakMap<Float64Array, Map<FindingCode, Judgement>>()
+
 function judged(code: FindingCode, figure: FigureName, values: Float64Array, order: (value: number) => number, rule: Rule = {}): Judgement {
-  const orders = new Uint8Array(values.length)
-  for (let i = 0; i < values.length; i++) orders[i] = order(values[i])
-  return { code, figure, orders, values, limit: rule.limit ?? null, byMiddle: rule.byMiddle ?? false, mustHold: rule.mustHold ?? false }
+  let ofValues = known.get(values)
+  if (!ofValues) {
+    ofValues = new Map()
+    known.set(values, ofValues)
+  }
+  let judgement = ofValues.get(code)
+  if (!judgement) {
+    const orders = new Uint8Array(values.length)
+    for (let i = 0; i < values.length; i++) orders[i] = order(values[i])
+    const byMiddle = rule.byMiddle ?? false
+    judgement = { code, figure, orders, counts: orderThatCounts(orders, byMiddle), values, limit: rule.limit ?? null, byMiddle, mustHold: rule.mustHold ?? false }
+    ofValues.set(code, judgement)
+  }
+  return judgement
 }
 
 function always(code: FindingCode, count: number, order: number): Judgement {
-  return { code, figure: null, orders: new Uint8Array(count).fill(order), values: null, limit: null, byMiddle: false, mustHold: true }
+  return { code, figure: null, orders: new Uint8Array(count).fill(order), counts: order, values: null, limit: null, byMiddle: false, mustHold: true }
 }
 
 export const isMagnet = (type: string): boolean => type === 'moving-magnet' || type === 'moving-iron'
@@ -187,7 +206,7 @@ export function shareFrom(orders: Uint8Array, order: number): number {
  * The order that counts for the verdict: the heaviest that more than a tenth of the draws reach. What only the
  * outermost draws reach is told, with where it turns, but does not decide.
  */
-export function orderThatCounts({ orders, byMiddle }: Judgement): number {
+function orderThatCounts(orders: Uint8Array, byMiddle: boolean): number {
   if (byMiddle) return orders[0]
   for (let order = 3; order > 0; order--) if (shareFrom(orders, order) > SHARE_THAT_COUNTS) return order
   return 0

@@ -6,7 +6,7 @@ import { drawInputs } from './draws'
 import { FigureBench, rangesOf } from './figure-draws'
 import { gateOf } from './gate'
 import type { MatchInputs } from './inputs'
-import { toFinding, orderThatCounts } from './judge'
+import { toFinding } from './judge'
 import { levelStages } from './level-stages'
 import { numberToFindNext } from './next-number'
 import { otherSettings } from './others'
@@ -19,8 +19,9 @@ import { summarise } from './settings'
 import { enumerateStates, statesEqual } from './states'
 import { reachableShare, verdictOf } from './verdict'
 
-/** Draws that rank every combination, and draws behind the figures of a shown setting. */
-const QUICK_DRAWS = 49
+/** Draws that rank every combination, that judge the neighbours of the advice, and behind a shown setting's figures. */
+const RANKING_DRAWS = 33
+const NEIGHBOUR_DRAWS = 129
 const FULL_DRAWS = 257
 /** States that may win somewhere in the doubt and are followed along the number to find next. */
 const MOST_CONTENDERS = 6
@@ -37,7 +38,7 @@ export function match(inputs: MatchInputs): MatchResult {
   const { preamp, present } = inputs
   const states = enumerateStates(preamp, present?.left)
   const distance = distanceFrom(inputs)
-  const quick = rankStates(inputs, states, { count: QUICK_DRAWS, depth: 'quick', distance })
+  const quick = rankStates(inputs, states, { count: RANKING_DRAWS, depth: 'quick', distance })
   const bench = new FigureBench(drawInputs(inputs, FULL_DRAWS), 'full')
   const chosen = candidateOf(bench, quick.candidates[0].state, distance)
   const standing = present && !sidesDiffer(present) ? candidateOf(bench, present.left, distance) : null
@@ -58,7 +59,7 @@ export function match(inputs: MatchInputs): MatchResult {
     moves: present ? movesBetween(preamp, present, chosen.state) : states.length === 1 ? [] : null,
     presentSidesDiffer: present ? sidesDiffer(present) : false,
     combinations: states.length,
-    others: otherSettings(quick.candidates[0], quick.candidates, preamp),
+    others: otherSettings(quick.candidates, new FigureBench(drawInputs(inputs, NEIGHBOUR_DRAWS), 'quick')),
     remedies: fits ? [] : remediesFor(chosen, bench.draws),
     next: numberToFindNext(inputs, doubts, contenders(quick.candidates), { distance, isWhereItStands }),
     doubts,
@@ -89,7 +90,7 @@ export function tryOut(inputs: MatchInputs, state: ControlState): {
 
 function evaluationOf(candidate: Candidate, bench: FigureBench): Evaluation {
   const findings = candidate.judgements
-    .map((judgement) => ({ finding: toFinding(judgement, bench.draws), counts: orderThatCounts(judgement) }))
+    .map((judgement) => ({ finding: toFinding(judgement, bench.draws), counts: judgement.counts }))
     .filter(({ finding }) => finding.worst !== 'fine')
     .sort((a, b) => b.counts - a.counts || WEIGHT_ORDER[b.finding.worst] - WEIGHT_ORDER[a.finding.worst])
     .map(({ finding }) => finding)

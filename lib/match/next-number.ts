@@ -2,7 +2,6 @@ import { rankStates, type Candidate, type DistanceTo } from './candidates'
 import type { ControlState } from './controls'
 import { valueAtLevel } from './ensemble'
 import type { MatchInputs } from './inputs'
-import { orderThatCounts } from './judge'
 import { withKnown } from './known-value'
 import type { Doubt, FindingCode, NumberToFindNext, Stretch, VerdictKind } from './result'
 import { summarise } from './settings'
@@ -74,7 +73,7 @@ function heaviestFinding({ judgements }: Candidate): FindingCode | null {
   let heaviest: FindingCode | null = null
   let most = 1
   for (const judgement of judgements) {
-    const order = orderThatCounts(judgement)
+    const order = judgement.counts
     if (order > most) {
       most = order
       heaviest = judgement.code

@@ -1,50 +1,77 @@
-import type { Candidate } from './candidates'
+import { candidateOf, type Candidate } from './candidates'
 import { rangeOf } from './ensemble'
-import { orderThatCounts, toFinding, type Judgement } from './judge'
-import type { Preamp } from './preamp'
-import type { OtherSetting } from './result'
+import type { FigureBench } from './figure-draws'
+import { toFinding, type Judgement } from './judge'
+import type { Range } from './quantity'
+import type { Finding, OtherSetting } from './result'
 import { summarise } from './settings'
 
-/** Every other combination, neighbours first, each with what decides against it or when it is worth a try. */
-export function otherSettings(chosen: Candidate, candidates: Candidate[], preamp: Preamp): OtherSetting[] {
-  return candidates
-    .filter((candidate) => candidate.state !== chosen.state)
+/**
+ * Every other combination, neighbours first, each with what decides against it or when it is worth a try. `ranked`
+ * is best first; neighbours of the best are worked out anew on the bench given, which has more draws.
+ */
+export function otherSettings(ranked: Candidate[], bench: FigureBench): OtherSetting[] {
+  const advised = candidateOf(bench, ranked[0].state, () => 0)
+  return ranked
+    .slice(1)
     .map((candidate) => {
-      const against = decidesAgainst(candidate, chosen)
-      const distance = settingDistance(candidate, chosen)
-      return {
-        setting: summarise(preamp, candidate.state),
-        outputVolts: rangeOf(candidate.figures.outputVolts),
-        roomDecibels: rangeOf(tighter(candidate)),
-        worthATry: against || distance !== 1 ? null : reasonToTry(candidate, chosen),
-        against: against ? toFinding(against, null) : null,
-        distance,
-      }
+      const distance = settingDistance(candidate, advised)
+      return distance <= 1 ? neighbour(candidateOf(bench, candidate.state, () => 0), advised, bench, distance) : distant(candidate, ranked[0], bench, distance)
     })
     .sort((a, b) => a.distance - b.distance || Number(a.against !== null) - Number(b.against !== null))
 }
 
-/** The rule in which this setting is heavier than a limit, or heavier than the advice, if any. */
-function decidesAgainst(candidate: Candidate, chosen: Candidate): Judgement | null {
+function neighbour(candidate: Candidate, advised: Candidate, bench: FigureBench, distance: number): OtherSetting {
+  const against = decidesAgainst(candidate, advised)
+  return {
+    setting: summarise(bench.draws.inputs.preamp, candidate.state),
+    outputVolts: rangeOf(candidate.figures.outputVolts),
+    roomDecibels: rangeOf(tighter(candidate)),
+    worthATry: against ? null : reasonToTry(candidate, advised),
+    against: against && toFinding(against, bench.draws),
+    distance,
+  }
+}
+
+function distant(candidate: Candidate, advised: Candidate, bench: FigureBench, distance: number): OtherSetting {
+  const against = decidesAgainst(candidate, advised)
+  return {
+    setting: summarise(bench.draws.inputs.preamp, candidate.state),
+    outputVolts: point(candidate.figures.outputVolts[0]),
+    roomDecibels: point(tighter(candidate)[0]),
+    worthATry: null,
+    against: against && inTheMiddle(against),
+    distance,
+  }
+}
+
+const point = (value: number): Range => ({ low: value, nominal: value, high: value })
+
+function inTheMiddle(judgement: Judgement): Finding {
+  const finding = toFinding(judgement, null)
+  return { ...finding, range: judgement.values && point(judgement.values[0]) }
+}
+
+/** The rule in which this setting is at a limit and heavier than the advice, if any. */
+function decidesAgainst(candidate: Candidate, advised: Candidate): Judgement | null {
   let decisive: Judgement | null = null
-  let most = 0
-  candidate.judgements.forEach((judgement) => {
-    const order = orderThatCounts(judgement)
-    const same = chosen.judgements.find(({ code, figure }) => code === judgement.code && figure === judgement.figure)
-    const advised = same ? orderThatCounts(same) : 0
-    if (order >= 2 && order > advised && order > most) {
-      most = order
-      decisive = judgement
-    }
-  })
+  let most = 1
+  for (const judgement of candidate.judgements) {
+    const order = judgement.counts
+    if (order <= most) continue
+    const same = advised.judgements.find(({ code, figure }) => code === judgement.code && figure === judgement.figure)
+    if (same && same.counts >= order) continue
+    most = order
+    decisive = judgement
+  }
   return decisive
 }
 
 /** In how many of gain, load, capacitance, filter and input the two differ. */
 function settingDistance({ setting: a }: Candidate, { setting: b }: Candidate): number {
   return [
-    a.path.id !== b.path.id,
-    a.gain.gainDecibels.nominal !== b.gain.gainDecibels.nominal,
+    a.path.id !== b.path.id && a.gain.id === b.gain.id,
+    a.gain.id !== b.gain.id,
     a.loadOhms.nominal !== b.loadOhms.nominal,
     a.inputFarads.nominal !== b.inputFarads.nominal,
     (a.filter === null) !== (b.filter === null),
@@ -60,11 +87,9 @@ function tighter({ figures }: Candidate): Float64Array {
 
 function reasonToTry({ setting: a, figures }: Candidate, { setting: b, figures: advised }: Candidate): OtherSetting['worthATry'] {
   if (a.filter && !b.filter) return 'if-rumble'
-  if (a.gain.gainDecibels.nominal !== b.gain.gainDecibels.nominal) {
-    return a.gain.gainDecibels.nominal > b.gain.gainDecibels.nominal ? 'if-quiet' : 'if-loud'
-  }
+  if (a.gain.id !== b.gain.id) return a.gain.gainDecibels.nominal > b.gain.gainDecibels.nominal ? 'if-quiet' : 'if-loud'
   if (a.loadOhms.nominal !== b.loadOhms.nominal) return 'if-load'
   if (a.inputFarads.nominal === b.inputFarads.nominal) return null
-  const lift = (draws: Candidate['figures']) => (draws.liftDecibels as Float64Array)[0] + (draws.fallDecibels as Float64Array)[0]
-  return lift(figures) > lift(advised) ? 'if-dull' : 'if-bright'
+  const tilt = (draws: Candidate['figures']) => (draws.liftDecibels as Float64Array)[0] + (draws.fallDecibels as Float64Array)[0]
+  return tilt(figures) > tilt(advised) ? 'if-dull' : 'if-bright'
 }

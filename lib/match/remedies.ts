@@ -1,6 +1,6 @@
 import type { Candidate } from './candidates'
 import type { Draws } from './draws'
-import { isMagnet, orderThatCounts, recommendedLoad, type Judgement } from './judge'
+import { isMagnet, recommendedLoad, type Judgement } from './judge'
 import type { FindingCode, Remedy } from './result'
 import { AT_LEAST, INSIDE } from './rules'
 
@@ -11,7 +11,8 @@ const LOAD_OVER_COIL = 4
 
 /** What would make it fit, for the rules that hold it back. Empty when nothing does. */
 export function remediesFor(chosen: Candidate, draws: Draws): Remedy[] {
-  const heavy = chosen.judgements.filter((judgement) => orderThatCounts(judgement) >= 2)
+  const heaviest = Math.max(2, ...chosen.judgements.map(({ counts }) => counts))
+  const heavy = chosen.judgements.filter(({ counts }) => counts === heaviest)
   const remedies: Remedy[] = []
   for (const judgement of heavy) {
     for (const remedy of remediesOf(judgement, chosen, draws)) {

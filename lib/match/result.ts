@@ -148,7 +148,10 @@ export interface Move {
   after: string
 }
 
-/** Another combination, and what speaks for or against it. */
+/**
+ * Another combination, and what speaks for or against it. Neighbours (distance 1) carry their ranges; of the rest
+ * only the middle is given, as a range of one point.
+ */
 export interface OtherSetting {
   setting: SettingSummary
   outputVolts: Range

@@ -1,5 +1,4 @@
 import type { Candidate } from './candidates'
-import { orderThatCounts } from './judge'
 import { SHARE_THAT_COUNTS } from './rules'
 import type { VerdictKind } from './result'
 
@@ -10,7 +9,7 @@ import type { VerdictKind } from './result'
  */
 export function verdictOf(candidate: Candidate, reachable: number, toMove: boolean): VerdictKind {
   if (candidate.shareRuledOut > SHARE_THAT_COUNTS) return reachable <= SHARE_THAT_COUNTS ? 'does-not-suit' : 'cannot-say'
-  const heaviest = Math.max(0, ...candidate.judgements.map(orderThatCounts))
+  const heaviest = Math.max(0, ...candidate.judgements.map(({ counts }) => counts))
   if (heaviest >= 2) return 'suits-with-a-limit'
   return toMove ? 'suits-with-changes' : 'suits'
 }
