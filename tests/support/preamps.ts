@@ -99,12 +99,12 @@ export function plugPreamp(): Preamp {
       {
         kind: 'slide',
         id: 'gain',
-        label: 'Gain, dB',
+        label: 'Gain',
         place: 'back',
         positions: [
-          { id: 'low', label: '56' },
-          { id: 'middle', label: '64' },
-          { id: 'high', label: '72' },
+          { id: 'low', label: '56 dB' },
+          { id: 'middle', label: '64 dB' },
+          { id: 'high', label: '72 dB' },
         ],
       },
     ],
