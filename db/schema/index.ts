@@ -1,3 +1,4 @@
 /** Every table, in one object: Drizzle wants it so. One line a domain. */
 export * from './catalogue'
 export * from './meta'
+export * from './setups'
