@@ -23,8 +23,11 @@ export default defineConfig({
   outputDir: 'test-results/pages',
   forbidOnly: true,
   workers: 2,
+  // Slow machines are not failures: only what never comes is.
+  timeout: 90_000,
+  expect: { timeout: 15_000 },
   reporter: [['list']],
-  use: { baseURL: address, launchOptions, locale: 'en-GB', timezoneId: 'UTC', trace: 'retain-on-failure' },
+  use: { baseURL: address, launchOptions, locale: 'en-GB', timezoneId: 'UTC', screenshot: 'only-on-failure' },
   projects: [
     { name: 'desktop', use: { viewport: { width: 1440, height: 900 } } },
     { name: 'phone', use: { viewport: { width: 390, height: 844 }, hasTouch: true, isMobile: true } },

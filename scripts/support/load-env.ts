@@ -1,6 +1,6 @@
-import nextEnv from '@next/env'
+import { loadEnvConfig } from '@next/env'
 
 /** Fills `process.env` from .env.local and .env as the started product does; what is set already stays. */
 export function loadEnv() {
-  nextEnv.loadEnvConfig(process.cwd(), false, { info: () => undefined, error: console.error })
+  loadEnvConfig(process.cwd(), false, { info: () => undefined, error: console.error })
 }
