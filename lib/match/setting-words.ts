@@ -1,7 +1,7 @@
 import type { ControlState, Group, LoadChoiceGroup } from './controls'
 import { controlOf, isActive, isOn, keyOf, placesOf } from './groups'
 import type { Preamp } from './preamp'
-import { resolveSetting } from './settings'
+import { resolveSetting, totalGainDecibels } from './settings'
 
 /** A number to so many figures, without empty decimals. */
 function toFigures(value: number, figures: number): string {
@@ -40,7 +40,7 @@ export function describeGroup(preamp: Preamp, group: Group, state: ControlState,
   if (group.sets === 'other' || group.sets === 'filter') return isOn(preamp, group, state) ? 'On' : 'Off'
   const setting = resolveSetting(preamp, state)
   if ('clash' in setting || !isActive(preamp, group, state)) return NOT_IN_USE
-  if (group.sets === 'gain') return gainInWords(setting.gain.gainDecibels.nominal)
+  if (group.sets === 'gain') return gainInWords(totalGainDecibels(setting))
   if (group.sets === 'input') return setting.path.label
   if (group.sets === 'capacitance') return faradsInWords(setting.inputFarads.nominal, figures)
   const printed = group.how === 'choice' ? printedLoad(preamp, group, state) : null

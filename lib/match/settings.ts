@@ -144,6 +144,11 @@ function loadChosen(preamp: Preamp, group: LoadChoiceGroup, state: ControlState)
   return chosenIn(preamp, group, group.options, state)?.loadOhms
 }
 
+/** Gain as an owner reads it: the electronics, and a transformer built into the input. Decibels, middle values. */
+export function totalGainDecibels({ gain, path }: Setting): number {
+  return gain.gainDecibels.nominal + (path.stepUp ? 20 * Math.log10(path.stepUp.ratio.nominal) : 0)
+}
+
 /**
  * A setting with its middle values, for showing and storing.
  * @throws when the state is not a real combination
@@ -153,7 +158,7 @@ export function summarise(preamp: Preamp, state: ControlState): SettingSummary {
   if ('clash' in setting) throw new Error(`Members ${setting.clash.members.join(' and ')} of "${setting.clash.control}" exclude each other.`)
   return {
     state: { ...state },
-    gainDecibels: setting.gain.gainDecibels.nominal,
+    gainDecibels: totalGainDecibels(setting),
     pathId: setting.path.id,
     loadOhms: setting.loadOhms.nominal,
     inputFarads: setting.inputFarads.nominal,
