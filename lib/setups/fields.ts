@@ -155,7 +155,7 @@ export const FIELDS: Record<Exclude<NumberField, 'ratio'>, FieldSpec> = {
     unit: 'ohm',
     bare: (type) => (isMagnet(type) ? 'kohm' : 'ohm'),
     noun: 'A load',
-    limits: byType({ magnet: [2000, 1e6], coil: [1, 1e6], any: [1, 1e6] }),
+    limits: byType({ magnet: [500, 1e6], coil: [1, 1e6], any: [1, 1e6] }),
     usual: byType({ magnet: [22e3, 100e3], coil: [10, 47e3], any: [10, 100e3] }),
     most: (type) => `Most loads for ${MANY_OF[type]} are`,
     slip: muchForType,

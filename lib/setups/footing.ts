@@ -6,11 +6,16 @@ import { written } from './units'
 /** What stands beside an output on a leaflet, and what that makes of it at the reference level. */
 export type Footing = Pick<Answers['cartridge'], 'velocity' | 'velocityCentimetresPerSecond' | 'meaning'>
 
-const SAID: Record<Exclude<Meaning, 'not-said'>, { kind: 'peak' | 'rms'; direction: 'lateral' | 'perChannel' }> = {
+const SAID: Record<Meaning, { kind?: 'peak' | 'rms'; direction?: 'lateral' | 'perChannel' }> = {
   'peak-lateral': { kind: 'peak', direction: 'lateral' },
   'rms-lateral': { kind: 'rms', direction: 'lateral' },
   'peak-channel': { kind: 'peak', direction: 'perChannel' },
   'rms-channel': { kind: 'rms', direction: 'perChannel' },
+  peak: { kind: 'peak' },
+  rms: { kind: 'rms' },
+  lateral: { direction: 'lateral' },
+  channel: { direction: 'perChannel' },
+  'not-said': {},
 }
 
 /** Groove speed as printed, cm/s; null where none is. */
@@ -27,9 +32,9 @@ function speed({ velocity, velocityCentimetresPerSecond }: Footing): { low: numb
  * "Per cm/s" is a printed speed of 1 cm/s; both RMS and of one channel unless the leaflet says otherwise.
  */
 export function footingOf(footing: Footing): Pick<NominalFactor, 'low' | 'nominal' | 'high'> {
-  const said = footing.meaning === 'not-said' ? null : SAID[footing.meaning]
+  const said = SAID[footing.meaning]
   if (footing.velocity === 'per-cm') {
-    return nominalFactor({ form: 'atVelocity', metresPerSecond: 0.01, ...(said ?? SAID['rms-channel']) })
+    return nominalFactor({ form: 'atVelocity', metresPerSecond: 0.01, ...SAID['rms-channel'], ...said })
   }
   const printed = speed(footing)
   if (!printed) return nominalFactor({ form: 'none' })
@@ -46,6 +51,10 @@ export const MEANING_WORDS: Record<Meaning, string> = {
   'rms-lateral': 'RMS, sideways',
   'peak-channel': 'peak, one channel',
   'rms-channel': 'RMS, one channel',
+  peak: 'peak, not said which way',
+  rms: 'RMS, not said which way',
+  lateral: 'sideways, not said if peak or RMS',
+  channel: 'one channel, not said if peak or RMS',
   'not-said': 'not said of what',
 }
 

@@ -33,8 +33,13 @@ export function isFromLeaflet(field: NumberField, answers: RawAnswers): boolean 
   return (answers.leaflet ?? '').split(' ').includes(markOf(field, answers))
 }
 
-/** The marks for values that were filled in just now, beside those of other fields. */
-export function withMarks(answers: RawAnswers, fields: readonly NumberField[]): RawAnswers {
-  const kept = (answers.leaflet ?? '').split(' ').filter((mark) => mark && !fields.some((field) => mark.startsWith(`${field}.`)))
+/**
+ * The marks of values that were filled in just now, beside those of other fields.
+ * @param fields what was filled in
+ * @param touched what else was emptied or replaced with it, and loses its mark
+ */
+export function withMarks(answers: RawAnswers, fields: readonly NumberField[], touched = fields): RawAnswers {
+  const gone = [...fields, ...touched].map((field) => `${field}.`)
+  const kept = (answers.leaflet ?? '').split(' ').filter((mark) => mark && !gone.some((start) => mark.startsWith(start)))
   return { ...answers, leaflet: [...kept, ...fields.map((field) => markOf(field, answers))].join(' ') }
 }

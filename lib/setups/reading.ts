@@ -35,7 +35,7 @@ const FRACTIONS: Record<string, string> = { '½': '.5', '¼': '.25', '¾': '.75'
 
 const UNIT = '[a-zμ%][a-zμ%]*(?:/[a-z]+)*'
 const RANGE = new RegExp(
-  `^(${NUMBER})\\s*(${UNIT})?\\s*(?:-|to|and|\\.\\.+|~)\\s*(${NUMBER})\\s*(${UNIT})?$`,
+  `^(${NUMBER})\\s*(${UNIT})?\\s*(?:-|to|and|~)\\s*(${NUMBER})\\s*(${UNIT})?$`,
 )
 const SPREAD = new RegExp(`^(${NUMBER})\\s*(${UNIT})?\\s*±\\s*(${NUMBER})\\s*(${UNIT})?$`)
 const ONE = new RegExp(`^(${NUMBER})\\s*(${UNIT})?$`)
@@ -47,13 +47,13 @@ function normalised(text: string): string {
   return text
     .replace(/(\d?)\s*([½¼¾])/g, (_, whole: string, part: string) => `${whole || '0'}${FRACTIONS[part]}`)
     .replace(/[\u2126\u03a9]/g, 'ohm')
+    .replace(/…|\.{2,}/g, ' to ')
     .normalize('NFKC')
     .toLowerCase()
     .replace(/µ/g, 'μ')
     .replace(/ω/g, 'ohm')
     .replace(/[‐‑‒–—−]/g, '-')
     .replace(/\+\/-|\+-/g, '±')
-    .replace(/…/g, '..')
     // Compliance: 1e-6 cm/dyn, 1 µm/mN and 1 "cu" are the same number.
     .replace(/\s*[x×*·]\s*10\s*\^?\s*-\s*6\s*(?:cm\s*\/\s*dyne?)?/g, ' cu')
     .replace(/ohms\b/g, 'ohm')

@@ -16,7 +16,11 @@ export type How = (typeof HOWS)[number]
 /** The groove speed that the output was printed for. */
 export const VELOCITIES = ['5', '3.54', 'other', 'per-cm', 'none'] as const
 export type VelocityChoice = (typeof VELOCITIES)[number]
-export const MEANINGS = ['peak-lateral', 'rms-lateral', 'peak-channel', 'rms-channel', 'not-said'] as const
+/** What that speed means, as it is asked. */
+export const ASKED_MEANINGS = ['peak-lateral', 'rms-lateral', 'peak-channel', 'rms-channel', 'not-said'] as const
+/** A leaflet in the catalogue may say one half of it and not the other. */
+export const HALF_MEANINGS = ['peak', 'rms', 'lateral', 'channel'] as const
+export const MEANINGS = [...ASKED_MEANINGS, ...HALF_MEANINGS] as const
 export type Meaning = (typeof MEANINGS)[number]
 
 export const COMPLIANCE_CONDITIONS = ['10-hz', '100-hz', 'static', 'not-said'] as const
