@@ -1,9 +1,10 @@
 import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
-import { UNKNOWNS, tryOut, type MatchInputs, type Quantity, type UnknownName } from '@/lib/match'
+import { UNKNOWNS, tryOut, type MatchInputs } from '@/lib/match'
 import { resolveSetting } from '@/lib/match/settings'
 import type { Setting } from '@/lib/match/preamp'
 import { anyInputs } from '../support/any-inputs'
+import { boxOf } from '../support/plain-box'
 import { plainFigures, type PlainFigures, type Point } from '../support/plain-check'
 
 /**
@@ -12,40 +13,6 @@ import { plainFigures, type PlainFigures, type Point } from '../support/plain-ch
  */
 const DRAWS = 1000
 const STATES = ['000000', '100010', '011001', '000100', '110011']
-
-/** The box of a setting: every quantity that the figures rest on. */
-function box(inputs: MatchInputs, setting: Setting): Record<UnknownName, Quantity> {
-  const { cartridge, arm, next, preamp } = inputs
-  const nothing = { low: 0, nominal: 0, high: 0, origin: 'printed' as const }
-  const stepUp = inputs.stepUp ?? setting.path.stepUp
-  return {
-    output: cartridge.outputVolts,
-    coilResistance: cartridge.coilOhms,
-    inductance: cartridge.coilHenries,
-    armWiring: arm.wiringFarads,
-    lead: arm.leadFarads,
-    stepUpRatio: stepUp?.ratio ?? nothing,
-    stepUpPrimary: stepUp?.primaryOhms ?? nothing,
-    stepUpSecondary: stepUp?.secondaryOhms ?? nothing,
-    stepUpCapacitance: stepUp?.secondaryFarads ?? nothing,
-    stepUpInductance: stepUp?.primaryHenries ?? nothing,
-    inputLoad: setting.loadOhms,
-    inputCapacitance: setting.inputFarads,
-    gain: setting.gain.gainDecibels,
-    voltageNoise: setting.gain.voltageNoise,
-    currentNoise: setting.gain.currentNoise,
-    maximumOutput: preamp.maximumOutputVolts,
-    outputResistance: preamp.outputOhms,
-    couplingCapacitor: preamp.couplingFarads ?? nothing,
-    nextMaximum: next.maximumVolts,
-    nextResistance: next.inputOhms,
-    cable: next.cableFarads,
-    armMass: arm.effectiveMassKilograms,
-    cartridgeMass: cartridge.massKilograms,
-    fixings: arm.fixingsKilograms,
-    compliance: cartridge.complianceMetresPerNewton,
-  }
-}
 
 /** A fixed generator (a linear congruential one), so that a failure can be run again. */
 function randoms(seed: number): () => number {
@@ -58,7 +25,7 @@ function randoms(seed: number): () => number {
 
 function sampled(inputs: MatchInputs, setting: Setting, seed: number): PlainFigures[] {
   const random = randoms(seed)
-  const quantities = box(inputs, setting)
+  const quantities = boxOf(inputs, setting)
   return Array.from({ length: DRAWS }, () => {
     const at = Object.fromEntries(
       UNKNOWNS.map((name) => [name, quantities[name].low + (quantities[name].high - quantities[name].low) * random()]),
