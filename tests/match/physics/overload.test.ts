@@ -130,6 +130,19 @@ describe('overload margin', () => {
     )
   })
 
+  // Source: the fine sweep. The peak lies between two points of the search's own grid, far from where the rest is worst.
+  test('a needle of a loading peak at the far end of the band is not stepped over', () => {
+    const needle: OverloadChain = {
+      network: { coilOhms: 300, coilHenries: 0.9, loadOhms: 20e6, loadFarads: 108e-12 },
+      sensitivityVoltSecondsPerMetre: 0.1,
+      envelope: { ...RECORD_ENVELOPES.loud, accelerationMetresPerSecondSquared: 20_000 },
+      limit: { topology: 'outputLimited', with7950: false, limit: { voltsAt1k: 0.1 } },
+    }
+    const least = Math.min(...logSpacedHertz({ low: 20, high: 20_000, count: 40_001 }).map((f) => overloadMarginDecibels(needle, f)))
+    expectWithin(worstMargin(needle).decibels, least, { db: 0.01 })
+    expect(worstMargin(needle).hertz).toBeGreaterThan(15_000)
+  })
+
   // Source: reckoned. 60 mV over 3 mV, both RMS at 1 kHz.
   test('re nominal is the printed figure over the nominal input', () => {
     expectWithin(
