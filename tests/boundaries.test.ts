@@ -40,7 +40,7 @@ const directions = [
   { from: /^db\//, may: /^(db\/|lib\/[^/]+\/terms$|drizzle-orm|better-sqlite3$|node:)/ },
   {
     from: /^components\//,
-    may: /^(components\/|lib\/match(\/|$)|lib\/[^/]+\/(terms|schema|views|format)(-[a-z-]+)?$|lib\/cautions\/texts$|react$|next\/|@hookform\/resolvers\/zod$|[a-z][^/]*$)/,
+    may: /^(components\/|lib\/match(\/|$)|lib\/[^/]+\/(terms|schema|views|format)(-[a-z-]+)?$|lib\/setups\/sentences\/|lib\/cautions\/texts$|react$|next\/|@hookform\/resolvers\/zod$|[a-z][^/]*$)/,
   },
   { from: /^lib\//, may: /^(?!app\/|components\/|tests\/|scripts\/)/ },
 ]

@@ -1,0 +1,41 @@
+import 'server-only'
+import type { Context } from '../kernel/context'
+import { Fault } from '../kernel/errors'
+import { reckon } from './reckon'
+import { insertRevision, revisionOf, saysTheSame, sheetByCode } from './rows'
+import type { AnswersInput } from './schema'
+import { fromStored } from './stored'
+
+const LAST_LETTER = 'Z'
+
+/** The letter after this one. @throws Fault conflict after Z */
+function letterAfter(letter: string): string {
+  if (letter === LAST_LETTER) {
+    throw new Fault('conflict', 'This sheet has as many revisions as it can hold. Start a new one from it instead.')
+  }
+  return String.fromCharCode(letter.charCodeAt(0) + 1)
+}
+
+/**
+ * Adds a revision to the sheet behind a code, reckoned now; earlier ones stay as they were. Where the newest one
+ * says the same already, that one is it: a double press adds nothing.
+ * @param change makes the answers out of those of the newest revision
+ * @throws Fault not_found, bad_input, conflict
+ */
+export function addRevision(context: Context, code: string, change: (answers: AnswersInput) => AnswersInput): { code: string; letter: string } {
+  const { db, now } = context
+  const before = sheetByCode(db, code)
+  const answers = change(fromStored<AnswersInput>(revisionOf(db, before.id).answers))
+  const reckoned = reckon(context, answers)
+  return db.transaction(
+    (tx) => {
+      const sheet = sheetByCode(tx, code)
+      const newest = revisionOf(tx, sheet.id)
+      if (saysTheSame(newest, reckoned)) return { code: sheet.code, letter: newest.letter }
+      const letter = letterAfter(newest.letter)
+      insertRevision(tx, sheet.id, letter, reckoned, now)
+      return { code: sheet.code, letter }
+    },
+    { behavior: 'immediate' },
+  )
+}
