@@ -102,7 +102,7 @@ function wire(answer: WireAnswer, usual: Quantity): Quantity {
 }
 
 /** Ratios in use; windings and lead of small transformers for moving coils. Common practice, no source. */
-const TYPICAL_STEP_UP = {
+export const TYPICAL_STEP_UP = {
   ratio: between(5, 40, 'typical'),
   primaryOhms: between(0.5, 20, 'typical'),
   secondaryOhms: between(100, 2000, 'typical'),

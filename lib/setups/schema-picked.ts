@@ -54,7 +54,7 @@ export function answersFromCartridge(view: CartridgeView, answers: RawAnswers = 
     cart: view.id,
     type: magnetic ? view.type : 'other',
     other: magnetic ? '' : view.type,
-    mono: view.channels === 'mono' ? 'yes' : '',
+    mono: view.channels === 'mono' ? 'yes' : 'no',
     velocity: '',
     velocityOther: '',
     meaning: '',

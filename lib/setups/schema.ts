@@ -1,7 +1,7 @@
 import { z } from 'zod'
 import { readAnswers, type Answers as ReadAnswers } from './answers'
 import type { RawAnswers } from './field-reading'
-import { ANSWER_KEYS, MAX_ANSWER_LENGTH, MAX_LEAFLET_LENGTH, type AnswerKey } from './terms'
+import { ANSWER_KEYS, DEFAULT_ANSWERS, MAX_ANSWER_LENGTH, MAX_LEAFLET_LENGTH, type AnswerKey } from './terms'
 
 const limitOf = (key: AnswerKey) => (key === 'leaflet' ? MAX_LEAFLET_LENGTH : MAX_ANSWER_LENGTH)
 const shape = Object.fromEntries(
@@ -34,12 +34,15 @@ export function answersFrom(values: Record<string, string | string[] | undefined
   return answers
 }
 
-/** The answers as a query, without a question mark, in a fixed order so that equal answers give equal links. */
+/**
+ * The answers as a query, without a question mark. In a fixed order and without what stands at its default anyway, so
+ * that equal answers give equal links.
+ */
 export function toQuery(answers: AnswersInput): string {
   const query = new URLSearchParams()
   for (const key of ANSWER_KEYS) {
     const text = answers[key]
-    if (text !== undefined && text !== '') query.append(key, text)
+    if (text !== undefined && text !== '' && text !== DEFAULT_ANSWERS[key]) query.append(key, text)
   }
   return query.toString()
 }

@@ -176,6 +176,17 @@ export const STEP_KEYS: Record<Step, readonly AnswerKey[]> = {
   ],
 }
 
+/** What a choice stands at before anyone touched it; not written into links. */
+export const DEFAULT_ANSWERS: Partial<Record<AnswerKey, string>> = {
+  ...Object.fromEntries(VALUE_FIELDS.map((field) => [`${field}How`, 'one'])),
+  present: 'unknown',
+  leadAs: 'whole',
+  cableAs: 'whole',
+  stepUp: 'no',
+  out: 'unbalanced',
+  mono: 'no',
+}
+
 /** Longest text kept for one answer, and for the list of values that came out of the catalogue. */
 export const MAX_ANSWER_LENGTH = 120
 export const MAX_LEAFLET_LENGTH = 600

@@ -1,0 +1,176 @@
+import { match } from '../match'
+import type { MatchInputs } from '../match/inputs'
+import type { Preamp } from '../match/preamp'
+import type { Quantity } from '../match/quantity'
+import type { Figures, MatchResult } from '../match/result'
+import { AT_LEAST, INSIDE } from '../match/rules'
+import { choiceOf, readAnswers, type Answers } from './answers'
+import type { RawAnswers } from './field-reading'
+import { footingOf } from './footing'
+import { figureText, gainText, roomText, valueText, voltsText } from './format'
+import { toMatchInputs } from './inputs'
+import { gateLead, gateTitle } from './sentences/gate'
+import { namesOf } from './sentences/names'
+import { TYPE_WORDS } from './sentences/title-block'
+
+/** What can be said after the answers so far. Plain data: made on the server, then anew in the browser. */
+export interface SoFarView {
+  heading: string
+  sentences: string[]
+  /** Heading of the strip on a phone. */
+  short: string
+  treble: { hertz: number[]; low: number[]; high: number[] } | null
+  /** Total capacitance across the coil, picofarads; null where it decides nothing. */
+  capacitance: { low: number; high: number; note: string } | null
+  settled: string[]
+  open: string[]
+  /** True when what the groove speed means is not said, and saying it could turn the advice. */
+  meaningMatters: boolean
+}
+
+const NOTHING: SoFarView = {
+  heading: 'Nothing yet',
+  sentences: ['Choose your preamp, then tell us what you know of the cartridge. It narrows with each answer.'],
+  short: 'Nothing yet',
+  treble: null,
+  capacitance: null,
+  settled: [],
+  open: [],
+  meaningMatters: false,
+}
+
+export function soFar(raw: RawAnswers, preamp: Preamp | null): SoFarView {
+  const { answers } = readAnswers(raw)
+  const lists = { settled: settledOf(answers), open: openOf(answers) }
+  if (!preamp) return { ...NOTHING, ...lists }
+  const inputs = toMatchInputs(answers, preamp)
+  const result = match(inputs)
+  if (result.gate) {
+    const heading = gateTitle(result.gate)
+    return { ...NOTHING, heading, short: heading, sentences: gateLead(result.gate, inputs).slice(0, 1), settled: lists.settled }
+  }
+  const told = levelSoFar(answers, inputs, result)
+  return {
+    ...told,
+    short: shortOf(told.heading, result, inputs),
+    treble: trebleOf(result),
+    capacitance: capacitanceOf(answers, result),
+    ...lists,
+    meaningMatters: meaningMatters(answers, inputs),
+  }
+}
+
+const isKnown = ({ origin }: Quantity) => origin !== 'typical' && origin !== 'unknown'
+
+type Told = Pick<SoFarView, 'heading' | 'sentences'>
+
+function levelSoFar(answers: Answers, inputs: MatchInputs, { chosen }: MatchResult): Told {
+  const { model, cartridge } = namesOf(inputs)
+  if (!chosen || !isKnown(inputs.cartridge.outputVolts)) {
+    const about = choiceOf(answers.given) === 'unknown' && !answers.cartridge.name ? 'the cartridge' : cartridge
+    return {
+      heading: answers.cartridge.name || choiceOf(answers.given) !== 'unknown' ? 'Its output decides the most' : 'Now the cartridge',
+      sentences: [`The ${model} is ready. What the leaflet says of ${about} narrows this down; its output in mV does most.`],
+    }
+  }
+  const { figures, setting } = chosen
+  const output = valueText(inputs.cartridge.outputVolts, 'volts')
+  const volts = `${output} gives ${voltsText(figures.outputVolts)} RMS`
+  const gives =
+    inputs.preamp.gains.length > 1
+      ? `${volts} with the ${model} at ${gainText(setting.gainDecibels)}, which suits best so far.`
+      : `${volts} out of the ${model}.`
+  return { heading: loudness(figures.outputVolts), sentences: [gives, roomSoFar(inputs, figures)].filter(Boolean) }
+}
+
+function loudness({ low, high }: { low: number; high: number }): string {
+  const [least, most] = INSIDE.outputVolts.worthKnowing
+  if (high < least) return 'It will be too quiet'
+  if (low > most) return 'It will be too loud'
+  if (low < least) return 'It may be too quiet'
+  return high > most ? 'It may be too loud' : 'It will be loud enough'
+}
+
+/** Said once room is tight or over: until then level is what counts. An amplifier that is not known yet is left out. */
+function roomSoFar({ next }: MatchInputs, { nextMarginDecibels, worstMarginDecibels }: Figures): string {
+  const nextCounts = next.kind !== 'unknown' && nextMarginDecibels.low < worstMarginDecibels.low
+  const least = nextCounts ? nextMarginDecibels : worstMarginDecibels
+  if (least.low >= AT_LEAST.worstMarginDecibels.fine) return ''
+  return least.low < 0 ? `On a loud record it is ${roomText(least.low)} at worst.` : `A loud record has ${roomText(least.low)} at worst.`
+}
+
+/** A doubt of the treble beyond this is still open, dB at 15 kHz. */
+const TREBLE_OPEN_DECIBELS = 2
+
+function shortOf(heading: string, { chosen }: MatchResult, { cartridge }: MatchInputs): string {
+  const level = heading.replace(/^It (?:will|may) be /, (start) => (start.includes('may') ? 'perhaps ' : ''))
+  const start = `So far: ${level.charAt(0).toLowerCase()}${level.slice(1)}`
+  if (!chosen || cartridge.type === 'moving-coil') return start
+  const { low, high } = chosen.figures.at15kHzDecibels
+  return `${start}. Treble ${high - low > TREBLE_OPEN_DECIBELS ? 'still open' : 'settled'}`
+}
+
+const short = (values: number[]) => values.map((value) => Number(value.toFixed(2)))
+
+function trebleOf({ curves }: MatchResult): SoFarView['treble'] {
+  if (!curves) return null
+  const { hertz, low, high } = curves.loading
+  return { hertz: hertz.map((value) => Number(value.toPrecision(5))), low: short(low), high: short(high) }
+}
+
+function capacitanceOf({ cartridge }: Answers, { chosen }: MatchResult): SoFarView['capacitance'] {
+  if (!chosen || cartridge.type === 'moving-coil') return null
+  const { low, high } = chosen.figures.totalFarads
+  const asked = cartridge.capacitancePicofarads
+  const asks = asked ? ` ${cartridge.name || 'The cartridge'} asks for ${figureText({ low: asked.low * 1e-12, nominal: asked.nominal * 1e-12, high: asked.high * 1e-12 }, 'farads')}.` : ''
+  const tens = (farads: number) => Math.round(farads * 1e11) * 10
+  return {
+    low: tens(low),
+    high: tens(high),
+    note: `Capacitance so far, ${figureText(chosen.figures.totalFarads, 'farads')}: arm, lead and preamp together.${asks}`,
+  }
+}
+
+/** Tried at both ends of what the speed may mean: when the advice or its weight turns, it is worth asking. */
+function meaningMatters({ cartridge }: Answers, inputs: MatchInputs): boolean {
+  const { outputMillivolts, velocity, meaning } = cartridge
+  if (!outputMillivolts || velocity === 'none' || meaning !== 'not-said') return false
+  const ends = [footingOf({ ...cartridge, meaning: 'peak-lateral' }), footingOf({ ...cartridge, meaning: 'rms-channel' })]
+  const [most, least] = ends.map(({ nominal }) => {
+    const volts = outputMillivolts.nominal * 1e-3 * nominal
+    const outputVolts: Quantity = { low: volts, nominal: volts, high: volts, origin: 'owner' }
+    return match({ ...inputs, cartridge: { ...inputs.cartridge, outputVolts } })
+  })
+  const advice = ({ verdict, chosen }: MatchResult) => JSON.stringify([verdict, chosen?.setting.state, chosen?.worst])
+  return advice(most) !== advice(least)
+}
+
+function settledOf({ cartridge, arm, next }: Answers): string[] {
+  const type = cartridge.type === 'unknown' ? [] : [TYPE_WORDS[cartridge.type]]
+  const texts = [cartridge.outputMillivolts, cartridge.coilOhms, cartridge.inductanceMillihenries, arm.effectiveMassGrams].flatMap((value) => value?.text ?? [])
+  const lead = 'metres' in arm.lead ? [`${arm.lead.metres.text} of lead`] : arm.lead.picofarads ? [`lead ${arm.lead.picofarads.text}`] : []
+  return [...type, ...texts, ...lead, ...(next.kind === 'unknown' ? [] : [NEXT_WORDS[next.kind]])]
+}
+
+const NEXT_WORDS = {
+  line: 'amplifier',
+  digital: 'digital input',
+  recorder: 'recorder',
+  headphones: 'headphone stage',
+  phono: 'phono input',
+}
+
+function openOf({ cartridge, arm, next }: Answers): string[] {
+  const coil = cartridge.type === 'moving-coil'
+  const electrical = cartridge.type === 'ceramic' || cartridge.type === 'strain-gauge' || cartridge.type === 'optical'
+  if (electrical) return []
+  return [
+    cartridge.type === 'unknown' && 'type',
+    !cartridge.outputMillivolts && 'output',
+    !cartridge.coilOhms && 'coil resistance',
+    !coil && !cartridge.inductanceMillihenries && 'inductance',
+    !('metres' in arm.lead) && !arm.lead.picofarads && !coil && 'arm lead',
+    !arm.effectiveMassGrams && 'arm',
+    next.kind === 'unknown' && 'amplifier',
+  ].filter((word) => word !== false)
+}
