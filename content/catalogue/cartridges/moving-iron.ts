@@ -47,7 +47,6 @@ export const MOVING_IRONS: CartridgeEntry[] = [
     complianceMicrometresPerMillinewton: dynamic10Hz(one('20', 20, '10 Hz')),
     trackingForceGrams: one('1.5 g', 1.5),
     notes: ['Capacitance: not critical.'],
-    odd: { loadOhms: 'So little inductance that the maker allows loads down to 10 kΩ.' },
   }),
   iron({
     maker: 'Pellmere',
@@ -105,7 +104,6 @@ export const MOVING_IRONS: CartridgeEntry[] = [
       outputMillivolts: 'A low-output moving iron: by its numbers it goes into an MC input.',
       coilOhms: 'Few turns, for low output.',
       inductanceMillihenries: 'Few turns, for low output.',
-      loadOhms: 'Few turns, for low output: 1 kΩ is plenty.',
     },
   }),
   iron({

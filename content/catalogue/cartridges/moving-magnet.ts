@@ -202,7 +202,6 @@ export const MOVING_MAGNETS: CartridgeEntry[] = [
     odd: {
       outputMillivolts: 'A four-channel type wound weaker for its short coil: a little under the usual magnet when 3.54 cm/s is meant as RMS.',
       loadOhms: 'Made for four-channel discs, which ask for 100 kΩ.',
-      loadPicofarads: 'Made for four-channel discs, which ask for less than 100 pF.',
     },
   }),
   magnet({
