@@ -1,3 +1,4 @@
+import { newBytes } from './arrays'
 import type { ControlState } from './controls'
 import { drawInputs } from './draws'
 import { FigureBench, type Depth, type FigureDraws } from './figure-draws'
@@ -47,7 +48,7 @@ export function candidateOf(bench: FigureBench, state: ControlState, distance: D
 }
 
 function worstOrders(judgements: Judgement[], count: number): Uint8Array {
-  const orders = new Uint8Array(count)
+  const orders = newBytes(count)
   for (const judgement of judgements) {
     const fixed = judgement.byMiddle ? judgement.orders[0] : -1
     for (let i = 0; i < count; i++) orders[i] = Math.max(orders[i], fixed >= 0 ? fixed : judgement.orders[i])

@@ -1,3 +1,4 @@
+import { newFloats } from './arrays'
 import { UNKNOWNS, type UnknownName } from './inputs'
 import { isExact, type Quantity, type Range } from './quantity'
 
@@ -68,7 +69,7 @@ export function valueAtLevel({ low, high }: Range, level: number): number {
 
 /** The values of one quantity over the ensemble; entry 0 is its middle. */
 export function spread(quantity: Quantity, name: UnknownName, ensemble: Ensemble): Float64Array {
-  const values = new Float64Array(ensemble.count)
+  const values = newFloats(ensemble.count)
   const levels = ensemble.levels[name]
   if (!levels || isExact(quantity)) return values.fill(quantity.nominal)
   const { low, high } = quantity

@@ -1,4 +1,4 @@
-import type { Filter } from './controls'
+import { newFloats } from './arrays'
 import type { Draws } from './draws'
 import { rangeOf, spread } from './ensemble'
 import { cartridgeLoad, each, figuresOutside, resonanceDraws, responseDraws, stepUpCorner, tiltDraws } from './figure-parts'
@@ -8,7 +8,7 @@ import { drawNetwork, noiseDraws, tallest, type NetworkDraws } from './network-d
 import { DIGITAL_SOURCE_VOLTS } from './physics/level'
 import { allowedInputVolts } from './physics/overload'
 import { playbackPower } from './physics/riaa'
-import type { GainOption, Setting } from './preamp'
+import type { Setting } from './preamp'
 import type { Quantity } from './quantity'
 import type { FigureName, Figures } from './result'
 
@@ -30,8 +30,9 @@ const NOISE_POINTS = { quick: 24, full: 48 } as const
  */
 export class FigureBench {
   private readonly known = new Map<string, unknown>()
+  private readonly keys = new WeakMap<Setting, SettingKeys>()
   private readonly spreads = new Map<Quantity, Float64Array>()
-  private readonly outside: Partial<Record<FigureName, Float64Array>>
+  private readonly outside: ReturnType<typeof figuresOutside>
 
   constructor(
     readonly draws: Draws,
@@ -43,6 +44,18 @@ export class FigureBench {
   private once<T>(key: string, make: () => T): T {
     if (!this.known.has(key)) this.known.set(key, make())
     return this.known.get(key) as T
+  }
+
+  /** Names of what settings share. Written once for each setting: numbers are slow to write out. */
+  private keysOf(setting: Setting): SettingKeys {
+    let keys = this.keys.get(setting)
+    if (!keys) {
+      const { path, loadOhms, inputFarads, gain, filter } = setting
+      const network = `${path.id} ${loadOhms.low} ${loadOhms.nominal} ${inputFarads.nominal}`
+      keys = { network, gain: `${network} ${gain.id}`, filter: filter ? `${filter.cornerHertz}/${filter.order}` : '' }
+      this.keys.set(setting, keys)
+    }
+    return keys
   }
 
   /** The draws of one of the preamp's own quantities; settings share them. */
@@ -57,23 +70,58 @@ export class FigureBench {
 
   /** All figures of a setting; those that only a sheet shows are null at `quick` depth. */
   figures(setting: Setting): FigureDraws {
-    const full = this.depth === 'full'
-    return {
-      ...NONE,
-      ...this.outside,
-      ...this.networkFigures(setting),
-      ...this.gainFigures(setting),
-      ...this.filterFigures(setting),
-      ...(full ? { ...this.shownFigures(setting), ...this.shownByFilter(setting) } : {}),
-    } as FigureDraws
+    const { outside } = this
+    const load = this.networkFigures(setting)
+    const gain = this.gainFigures(setting)
+    const next = this.filterFigures(setting)
+    // Written out, name by name: this runs for every combination, and spreading objects would take most of the time.
+    // Null is what ranking does not need.
+    const quick: FigureDraws = {
+      outputDecibelVolts: null,
+      outputReDigitalDecibels: null,
+      levelLossDecibels: null,
+      extremeMarginDecibels: null,
+      at10kHzDecibels: null,
+      at15kHzDecibels: null,
+      at20kHzDecibels: null,
+      resonanceHertz: null,
+      peakHertz: null,
+      peakDecibels: null,
+      minus3dBHertz: null,
+      snrFlatDecibels: null,
+      coilSnrWeightedDecibels: null,
+      filterAtResonanceDecibels: null,
+      filterAt4HertzDecibels: null,
+      filterAt20HertzDecibels: null,
+      riaaAtResonanceDecibels: null,
+      stepUpBassCornerHertz: null,
+      inputVolts: load.inputVolts,
+      totalFarads: load.totalFarads,
+      cartridgeLoadOhms: load.cartridgeLoadOhms,
+      loadRatio: load.loadRatio,
+      liftDecibels: load.liftDecibels,
+      fallDecibels: load.fallDecibels,
+      outputVolts: gain.outputVolts,
+      overloadMarginDecibels: gain.overloadMarginDecibels,
+      worstMarginDecibels: gain.worstMarginDecibels,
+      worstMarginHertz: gain.worstMarginHertz,
+      snrWeightedDecibels: gain.snrWeightedDecibels,
+      nextMarginDecibels: next.nextMarginDecibels,
+      nextMarginHertz: next.nextMarginHertz,
+      armResonanceHertz: outside.armResonanceHertz,
+      cableLossAt20kHzDecibels: outside.cableLossAt20kHzDecibels,
+      bassCornerHertz: outside.bassCornerHertz,
+      dividerLossDecibels: outside.dividerLossDecibels,
+    }
+    return this.depth === 'full' ? { ...quick, ...this.shownFigures(setting), ...this.shownByFilter(setting) } : quick
   }
 
   network(setting: Setting): NetworkDraws {
-    return this.once(`network ${networkKey(setting)}`, () => drawNetwork(this.draws, setting))
+    return this.once(`network ${this.keysOf(setting).network}`, () => drawNetwork(this.draws, setting))
   }
 
   private networkFigures(setting: Setting) {
-    return this.once(`load ${networkKey(setting)}`, () => {
+    return this.once(`load ${this.keysOf(setting).network}`, () => {
       const network = this.network(setting)
       const { count, emfVolts, at1kHz, farads } = network
       const cartridgeLoadOhms = each(count, (i) => cartridgeLoad(this.draws, setting, network, i))
@@ -89,7 +137,7 @@ export class FigureBench {
   }
 
   private noise(setting: Setting) {
-    return this.once(`noise ${networkKey(setting)}`, () => {
+    return this.once(`noise ${this.keysOf(setting).network}`, () => {
       const { preamp, temperatureKelvin } = this.draws.inputs
       const table = noiseTable(preamp.iecBass, NOISE_POINTS[this.depth])
       return { table, ...noiseDraws(this.network(setting), table, temperatureKelvin) }
@@ -97,7 +145,7 @@ export class FigureBench {
   }
 
   private gainFigures(setting: Setting) {
-    return this.once(`gain ${gainKey(setting)}`, () => {
+    return this.once(`gain ${this.keysOf(setting).gain}`, () => {
       const { values, inputs } = this.draws
       const { inputVolts } = this.networkFigures(setting)
       const openVolts = this.openVolts(setting)
@@ -117,8 +165,8 @@ export class FigureBench {
   }
 
   private filterFigures(setting: Setting) {
-    const filter = setting.filter ? `${setting.filter.cornerHertz}/${setting.filter.order}` : ''
-    return this.once(`filter ${gainKey(setting)} ${filter}`, () => {
+    const keys = this.keysOf(setting)
+    return this.once(`filter ${keys.gain} ${keys.filter}`, () => {
       const { outputVolts } = this.gainFigures(setting)
       const { nextMaximum } = this.draws.values
       const peaks = this.peaks(setting, 'next', 'loud')
@@ -135,7 +183,7 @@ export class FigureBench {
 
   /** At the unbalanced output with nothing connected. */
   private openVolts(setting: Setting): Float64Array {
-    return this.once(`open ${gainKey(setting)}`, () => {
+    return this.once(`open ${this.keysOf(setting).gain}`, () => {
       const { inputVolts } = this.networkFigures(setting)
       const gain = this.drawn(setting.gain.gainDecibels, 'gain')
       return each(inputVolts.length, (i) => inputVolts[i] * 10 ** (gain[i] / 20))
@@ -152,11 +200,16 @@ export class FigureBench {
     })
   }
 
-  /** What records ask of a stage, by the stage's own shape over frequency. */
+  /** What records ask of a stage, by the stage's own shape over frequency; input stages with measured points differ. */
+  private demandKey({ gain }: Setting, stage: Stage, level: string, filterKey: string): string {
+    const own = stage !== 'input' ? '' : gain.overload.length > 1 ? gain.id : 'input'
+    return `${own} ${level} ${stage === 'next' ? filterKey : ''}`
+  }
+
   private demand(setting: Setting, stage: Stage, level: 'loud' | 'extreme'): Demand {
     const { preamp } = this.draws.inputs
-    const filter = stage === 'next' ? setting.filter : null
-    return this.once(`demand ${demandKey(setting.gain, stage, level, filter)}`, () => {
+    return this.once(`demand ${this.demandKey(setting, stage, level, this.keysOf(setting).filter)}`, () => {
+      const filter = stage === 'next' ? setting.filter : null
       const limit = stage === 'input' ? inputLimit(preamp, setting.gain) : equalisedLimit(preamp)
       const at1kHz = allowedInputVolts(limit, 1000)
       const grid = marginGrid(MARGIN_POINTS[this.depth], level)
@@ -165,8 +218,8 @@ export class FigureBench {
   }
 
   private peaks(setting: Setting, stage: Stage, level: 'loud' | 'extreme') {
-    const filter = stage === 'next' ? setting.filter : null
-    const key = `peaks ${networkKey(setting)} ${demandKey(setting.gain, stage, level, filter)}`
+    const keys = this.keysOf(setting)
+    const key = `peaks ${keys.network} ${this.demandKey(setting, stage, level, keys.filter)}`
     return this.once(key, () => tallest(this.network(setting), this.demand(setting, stage, level)))
   }
 
@@ -178,7 +231,8 @@ export class FigureBench {
     const allowed = allowedInputVolts(inputLimit(preamp, setting.gain), 1000)
     const margin = each(inputVolts.length, (i) => 20 * Math.log10(allowed / inputVolts[i]) - 10 * Math.log10(input.power[i]))
     if (preamp.topology === 'output-limited') return { margin, hertz: input.hertz }
-    const hertz = input.hertz.slice()
+    const hertz = newFloats(margin.length)
+    hertz.set(input.hertz)
     const output = this.peaks(setting, 'output', level)
     const openVolts = this.openVolts(setting)
     const most = this.draws.values.maximumOutput
@@ -212,7 +266,7 @@ export class FigureBench {
   }
 
   private shownByFilter({ filter }: Setting): Partial<FigureDraws> {
-    const arm = this.outside.armResonanceHertz as Float64Array
+    const arm = this.outside.armResonanceHertz
     const with7950 = this.draws.inputs.preamp.iecBass
     const attenuation = (hertz: (i: number) => number) => each(arm.length, (i) => 10 * Math.log10(filterPower(hertz(i), filter)))
     return {
@@ -226,24 +280,11 @@ export class FigureBench {
 
 type Stage = 'input' | 'output' | 'next'
 
-const networkKey = ({ path, loadOhms, inputFarads }: Setting): string => `${path.id} ${loadOhms.low} ${loadOhms.nominal} ${inputFarads.nominal}`
-const gainKey = (setting: Setting): string => `${networkKey(setting)} ${setting.gain.id}`
-
-/** Stages behind the equalisation share a shape; an input stage with measured points has its own at each gain. */
-function demandKey(gain: GainOption, stage: Stage, level: string, filter: Filter | null): string {
-  const own = stage === 'input' ? (gain.overload.length > 1 ? gain.id : 'input') : ''
-  return `${own} ${level} ${filter ? `${filter.cornerHertz}/${filter.order}` : ''}`
+interface SettingKeys {
+  network: string
+  gain: string
+  filter: string
 }
-
-const NONE = {
-  extremeMarginDecibels: null,
-  resonanceHertz: null,
-  peakHertz: null,
-  peakDecibels: null,
-  minus3dBHertz: null,
-  stepUpBassCornerHertz: null,
-  bassCornerHertz: null,
-} satisfies Partial<Record<FigureName, null>>
 
 /** The ranges of every figure over the draws. */
 export function rangesOf(draws: FigureDraws): Figures {

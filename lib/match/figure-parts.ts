@@ -1,9 +1,9 @@
+import { newFloats } from './arrays'
 import type { Draws } from './draws'
 import { spread } from './ensemble'
 import { deviationDecibels, stepUpOf, type NetworkDraws } from './network-draws'
 import { angular } from './physics/constants'
 import type { Setting } from './preamp'
-import type { FigureName } from './result'
 
 /** Single figures over the draws, each from the network or from what lies outside the preamp's switches. */
 
@@ -11,7 +11,7 @@ const W2_AT = { low: angular(1000) ** 2, high: angular(15_000) ** 2, cable: angu
 
 /** An array of one value a draw. */
 export function each(count: number, of: (i: number) => number): Float64Array {
-  const values = new Float64Array(count)
+  const values = newFloats(count)
   for (let i = 0; i < count; i++) values[i] = of(i)
   return values
 }
@@ -25,8 +25,8 @@ export function cartridgeLoad({ values, inputs }: Draws, setting: Setting, netwo
 
 /** Largest lift and deepest fall between 1 and 15 kHz. D is convex in ω², so its ends and its lowest point decide. */
 export function tiltDraws({ count, d0, d1, d2, at1kHz }: NetworkDraws) {
-  const liftDecibels = new Float64Array(count)
-  const fallDecibels = new Float64Array(count)
+  const liftDecibels = newFloats(count)
+  const fallDecibels = newFloats(count)
   const D = (i: number, w: number) => d0[i] + w * (d1[i] + w * d2[i])
   for (let i = 0; i < count; i++) {
     const bottom = d2[i] > 0 ? Math.min(Math.max(-d1[i] / (2 * d2[i]), W2_AT.low), W2_AT.high) : d1[i] < 0 ? W2_AT.high : W2_AT.low
@@ -82,7 +82,7 @@ export function stepUpCorner(draws: Draws, setting: Setting): Float64Array | nul
 }
 
 /** Figures that no switch changes: the arm, and the way from output socket to next input. */
-export function figuresOutside({ values, inputs, ensemble }: Draws): Partial<Record<FigureName, Float64Array>> {
+export function figuresOutside({ values, inputs, ensemble }: Draws) {
   const { count } = ensemble
   const armResonanceHertz = each(count, (i) => {
     const mass = values.armMass[i] + values.cartridgeMass[i] + values.fixings[i]
@@ -94,5 +94,5 @@ export function figuresOutside({ values, inputs, ensemble }: Draws): Partial<Rec
     ? each(count, (i) => 1 / (2 * Math.PI * (values.outputResistance[i] + values.nextResistance[i]) * values.couplingCapacitor[i]))
     : null
   const dividerLossDecibels = each(count, (i) => 20 * Math.log10(values.nextResistance[i] / (values.nextResistance[i] + values.outputResistance[i])))
-  return { armResonanceHertz, cableLossAt20kHzDecibels, ...(bassCornerHertz ? { bassCornerHertz } : {}), dividerLossDecibels }
+  return { armResonanceHertz, cableLossAt20kHzDecibels, bassCornerHertz, dividerLossDecibels }
 }

@@ -1,3 +1,4 @@
+import { newBytes } from './arrays'
 import type { Draws } from './draws'
 import type { FigureDraws } from './figure-draws'
 import type { UnknownName } from './inputs'
@@ -48,7 +49,7 @@ function judged(code: FindingCode, figure: FigureName, values: Float64Array, ord
   }
   let judgement = ofValues.get(code)
   if (!judgement) {
-    const orders = new Uint8Array(values.length)
+    const orders = newBytes(values.length)
     for (let i = 0; i < values.length; i++) orders[i] = order(values[i])
     const byMiddle = rule.byMiddle ?? false
     judgement = { code, figure, orders, counts: orderThatCounts(orders, byMiddle), values, limit: rule.limit ?? null, byMiddle, mustHold: rule.mustHold ?? false }
@@ -58,7 +59,7 @@ function judged(code: FindingCode, figure: FigureName, values: Float64Array, ord
 }
 
 function always(code: FindingCode, count: number, order: number): Judgement {
-  return { code, figure: null, orders: new Uint8Array(count).fill(order), counts: order, values: null, limit: null, byMiddle: false, mustHold: true }
+  return { code, figure: null, orders: newBytes(count).fill(order), counts: order, values: null, limit: null, byMiddle: false, mustHold: true }
 }
 
 export const isMagnet = (type: string): boolean => type === 'moving-magnet' || type === 'moving-iron'

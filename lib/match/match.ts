@@ -15,7 +15,7 @@ import { remediesFor } from './remedies'
 import type { Curves, Evaluation, LevelStage, MatchResult, VerdictKind } from './result'
 import { ENGINE_VERSION, RULES_VERSION, SHARE_THAT_COUNTS, WEIGHT_ORDER, weightOf } from './rules'
 import { movesBetween, sidesDiffer } from './moves'
-import { summarise } from './settings'
+import { summaryOf } from './settings'
 import { enumerateStates, statesEqual } from './states'
 import { reachableShare, verdictOf } from './verdict'
 
@@ -63,7 +63,7 @@ export function match(inputs: MatchInputs): MatchResult {
     remedies: fits ? [] : remediesFor(chosen, bench.draws),
     next: numberToFindNext(inputs, doubts, contenders(quick.candidates), { distance, isWhereItStands }),
     doubts,
-    tonight: verdict === 'cannot-say' ? summarise(preamp, gentlest(quick.candidates).state) : null,
+    tonight: verdict === 'cannot-say' ? summaryFrom(gentlest(quick.candidates)) : null,
     curves: curvesOf(bench, chosen.setting, chosen.figures),
     presentCurves: standing && !statesEqual(standing.state, chosen.state) ? curvesOf(bench, standing.setting, standing.figures) : null,
     stages: levelStages(bench, chosen.setting, chosen.figures),
@@ -95,7 +95,7 @@ function evaluationOf(candidate: Candidate, bench: FigureBench): Evaluation {
     .sort((a, b) => b.counts - a.counts || WEIGHT_ORDER[b.finding.worst] - WEIGHT_ORDER[a.finding.worst])
     .map(({ finding }) => finding)
   return {
-    setting: summarise(bench.draws.inputs.preamp, candidate.state),
+    setting: summaryFrom(candidate),
     figures: rangesOf(candidate.figures),
     findings,
     worst: weightOf(candidate.orders.reduce((a, b) => Math.max(a, b), 0)),
@@ -132,6 +132,7 @@ function contenders(candidates: Candidate[]): ControlState[] {
   const ordered = [...wins.entries()].sort((a, b) => b[1] - a[1]).map(([candidate]) => candidate)
   return [...new Set([candidates[0], ...ordered])].slice(0, MOST_CONTENDERS).map(({ state }) => state)
 }
+const summaryFrom = ({ setting, state }: Candidate) => summaryOf(setting, state)
 const harm = (order: number): number => (order <= 1 ? 0 : order)
 
 /** Lowest gain first: the setting that can do least harm while the level is not known. */

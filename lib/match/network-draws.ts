@@ -1,3 +1,4 @@
+import { newFloats } from './arrays'
 import type { Draws } from './draws'
 import { spread } from './ensemble'
 import { fourKT, type Demand, type NoiseTable } from './frequency-tables'
@@ -44,7 +45,7 @@ export function drawNetwork(draws: Draws, setting: Setting): NetworkDraws {
   const load = spread(setting.loadOhms, 'inputLoad', ensemble)
   const input = spread(setting.inputFarads, 'inputCapacitance', ensemble)
   const transformer = stepUpOf(draws, setting)
-  const make = () => new Float64Array(count)
+  const make = () => newFloats(count)
   const network: NetworkDraws = {
     count,
     emfVolts: make(),
@@ -88,8 +89,8 @@ export interface Tallest {
 }
 
 export function tallest(network: NetworkDraws, { w2, demand, hertz }: Demand): Tallest {
-  const power = new Float64Array(network.count)
-  const at = new Float64Array(network.count)
+  const power = newFloats(network.count)
+  const at = newFloats(network.count)
   for (let i = 0; i < network.count; i++) {
     const d0 = network.d0[i]
     const d1 = network.d1[i]
@@ -122,7 +123,7 @@ export interface NoiseDraws {
  * Re Z = (R + (R² + ω²L²)/R_l)/D. Thermal noise is 4kT·Re Z, load resistor included.
  */
 export function noiseDraws(network: NetworkDraws, table: NoiseTable, kelvin: number): NoiseDraws {
-  const make = () => new Float64Array(network.count)
+  const make = () => newFloats(network.count)
   const noise = { thermalFlat: make(), thermalWeighted: make(), currentFlat: make(), currentWeighted: make() }
   const { w2, flat, weighted } = table
   const boltzmann = fourKT(kelvin)

@@ -4,7 +4,7 @@ import { valueAtLevel } from './ensemble'
 import type { MatchInputs } from './inputs'
 import { withKnown } from './known-value'
 import type { Doubt, FindingCode, NumberToFindNext, Stretch, VerdictKind } from './result'
-import { summarise } from './settings'
+import { summaryOf } from './settings'
 import { reachableShare, verdictOf } from './verdict'
 
 /** Values of the unknown that are tried, and draws of everything else at each. */
@@ -40,14 +40,14 @@ export function numberToFindNext(
     const best = candidates[0]
     steps.push({ value, candidate: best, verdict: verdictOf(best, reachableShare(candidates), !moves.isWhereItStands(best.state)) })
   }
-  const stretches = joinSmall(cut(inputs, steps))
+  const stretches = joinSmall(cut(steps))
   return { unknown: leading.unknown, low: leading.low, nominal: leading.nominal, high: leading.high, share: leading.share, stretches }
 }
 
 const key = ({ verdict, candidate }: Step) => `${verdict} ${verdict === 'does-not-suit' ? '' : JSON.stringify(candidate.state)}`
 
 /** Neighbouring values with the same advice become one stretch; a turn lies midway between two values, in proportion. */
-function cut(inputs: MatchInputs, steps: Step[]): Stretch[] {
+function cut(steps: Step[]): Stretch[] {
   const stretches: Stretch[] = []
   steps.forEach((step, k) => {
     const previous = steps[k - 1]
@@ -62,7 +62,7 @@ function cut(inputs: MatchInputs, steps: Step[]): Stretch[] {
       from,
       to: step.value,
       verdict: step.verdict,
-      setting: fits ? summarise(inputs.preamp, step.candidate.state) : null,
+      setting: fits ? summaryOf(step.candidate.setting, step.candidate.state) : null,
       finding: heaviestFinding(step.candidate),
     })
   })

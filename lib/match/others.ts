@@ -1,10 +1,11 @@
 import { candidateOf, type Candidate } from './candidates'
 import { rangeOf } from './ensemble'
+import { each } from './figure-parts'
 import type { FigureBench } from './figure-draws'
 import { toFinding, type Judgement } from './judge'
 import type { Range } from './quantity'
 import type { Finding, OtherSetting } from './result'
-import { summarise } from './settings'
+import { summaryOf } from './settings'
 
 /**
  * Every other combination, neighbours first, each with what decides against it or when it is worth a try. `ranked`
@@ -16,7 +17,7 @@ export function otherSettings(ranked: Candidate[], bench: FigureBench): OtherSet
     .slice(1)
     .map((candidate) => {
       const distance = settingDistance(candidate, advised)
-      return distance <= 1 ? neighbour(candidateOf(bench, candidate.state, () => 0), advised, bench, distance) : distant(candidate, ranked[0], bench, distance)
+      return distance <= 1 ? neighbour(candidateOf(bench, candidate.state, () => 0), advised, bench, distance) : distant(candidate, ranked[0], distance)
     })
     .sort((a, b) => a.distance - b.distance || Number(a.against !== null) - Number(b.against !== null))
 }
@@ -24,7 +25,7 @@ export function otherSettings(ranked: Candidate[], bench: FigureBench): OtherSet
 function neighbour(candidate: Candidate, advised: Candidate, bench: FigureBench, distance: number): OtherSetting {
   const against = decidesAgainst(candidate, advised)
   return {
-    setting: summarise(bench.draws.inputs.preamp, candidate.state),
+    setting: summaryOf(candidate.setting, candidate.state),
     outputVolts: rangeOf(candidate.figures.outputVolts),
     roomDecibels: rangeOf(tighter(candidate)),
     worthATry: against ? null : reasonToTry(candidate, advised),
@@ -33,10 +34,10 @@ function neighbour(candidate: Candidate, advised: Candidate, bench: FigureBench,
   }
 }
 
-function distant(candidate: Candidate, advised: Candidate, bench: FigureBench, distance: number): OtherSetting {
+function distant(candidate: Candidate, advised: Candidate, distance: number): OtherSetting {
   const against = decidesAgainst(candidate, advised)
   return {
-    setting: summarise(bench.draws.inputs.preamp, candidate.state),
+    setting: summaryOf(candidate.setting, candidate.state),
     outputVolts: point(candidate.figures.outputVolts[0]),
     roomDecibels: point(tighter(candidate)[0]),
     worthATry: null,
@@ -82,7 +83,7 @@ function settingDistance({ setting: a }: Candidate, { setting: b }: Candidate): 
 function tighter({ figures }: Candidate): Float64Array {
   const preamp = figures.worstMarginDecibels as Float64Array
   const next = figures.nextMarginDecibels as Float64Array
-  return preamp.map((value, i) => Math.min(value, next[i]))
+  return each(preamp.length, (i) => Math.min(preamp[i], next[i]))
 }
 
 function reasonToTry({ setting: a, figures }: Candidate, { setting: b, figures: advised }: Candidate): OtherSetting['worthATry'] {

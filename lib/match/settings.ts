@@ -156,6 +156,11 @@ export function totalGainDecibels({ gain, path }: Setting): number {
 export function summarise(preamp: Preamp, state: ControlState): SettingSummary {
   const setting = resolveSetting(preamp, state)
   if ('clash' in setting) throw new Error(`Members ${setting.clash.members.join(' and ')} of "${setting.clash.control}" exclude each other.`)
+  return summaryOf(setting, state)
+}
+
+/** The summary of a setting that is resolved already, with the state it came from. */
+export function summaryOf(setting: Setting, state: ControlState): SettingSummary {
   return {
     state: { ...state },
     gainDecibels: totalGainDecibels(setting),
