@@ -30,7 +30,7 @@ for (const path of pages) {
   test(`${path} asks nobody else for anything, and the browser refuses none of it`, async ({ page, baseURL }) => {
     const strays = strayRequests(page, baseURL ?? '')
     const said = complaints(page)
-    await page.goto(path, { waitUntil: 'networkidle' })
+    await page.goto(path, { waitUntil: 'load' })
     await expect(page.getByRole('heading', { level: 1 })).toHaveCount(1)
     const fonts = await page.evaluate(async () => {
       await document.fonts.ready

@@ -51,7 +51,6 @@ test('markup that slipped into a page runs no script', async ({ page }) => {
   const failed = page.waitForResponse('/none.png')
   await page.goto('/stop', { waitUntil: 'load' })
   await failed
-  await expect(page.locator('img[src="/none.png"]')).toHaveCount(1)
   expect(await page.evaluate(() => document.documentElement.dataset.intruder ?? 'nothing ran')).toBe('nothing ran')
 })
 
