@@ -60,7 +60,7 @@ export const HIGH_OUTPUT_COILS: CartridgeEntry[] = [
     impedanceOhms: one('Z 120 Ω', 120, '1 kHz'),
     loadOhms: LOAD_47K,
     massGrams: one('5.3 g', 5.3),
-    complianceMicrometresPerMillinewton: dynamic100Hz(one('9 × 10⁻⁶ cm/dyne', 9, '100 Hz')),
+    complianceMicrometresPerMillinewton: dynamic100Hz(one('9 × 10-6 cm/dyne', 9, '100 Hz')),
     trackingForceGrams: one('1.8 g', 1.8),
   }),
 ]

@@ -71,7 +71,7 @@ export const MOVING_IRONS: CartridgeEntry[] = [
     loadOhms: LOAD_47K,
     loadPicofarads: total(between('150–250 pF', 150, 250, 'total')),
     massGrams: one('6.6 g', 6.6),
-    complianceMicrometresPerMillinewton: dynamic100Hz(one('8.5 × 10⁻⁶ cm/dyne', 8.5, '100 Hz')),
+    complianceMicrometresPerMillinewton: dynamic100Hz(one('8.5 × 10-6 cm/dyne', 8.5, '100 Hz')),
     trackingForceGrams: between('1.5–2.0 g', 1.5, 2),
     notes: ['Induced magnet; the stylus pulls out.'],
   }),
