@@ -56,7 +56,25 @@ describe('ranges of every figure', () => {
           expect(range.high - range.low, `${name}: reported against drawn width ${width}`).toBeLessThanOrEqual(1.25 * width + 2 * slack)
         }
       }),
-      { numRuns: 30, seed: 20261201 },
+      { numRuns: 30, seed: 20261201, endOnFailure: true },
+    )
+  })
+
+  test('with everything known are the formulas themselves', { timeout: 60_000 }, () => {
+    fc.assert(
+      fc.property(anyInputs, fc.constantFrom(...STATES), (inputs, bank) => {
+        const setting = resolveSetting(inputs.preamp, { bank })
+        if ('clash' in setting) throw new Error('the test picked a clash')
+        const box = boxOf(inputs, setting)
+        const middle = Object.fromEntries(UNKNOWNS.map((name) => [name, box[name].nominal])) as Point
+        const reported = tryOut(inputs, { bank }).evaluation.figures
+        for (const [name, value] of Object.entries(plainFigures(inputs, setting, middle))) {
+          // Margins and tilts are found on a grid of pitches, noise by quadrature. The rest is closed form.
+          const grid = /Margin|lift|fall/.test(name) ? 0.01 : /snr|Snr/.test(name) ? 0.001 : name.endsWith('Decibels') ? 1e-6 : Math.abs(value) * 1e-9
+          expect(Math.abs(reported[name as keyof PlainFigures]!.nominal - value), name).toBeLessThanOrEqual(grid)
+        }
+      }),
+      { numRuns: 100, seed: 20261203, endOnFailure: true },
     )
   })
 })

@@ -87,7 +87,7 @@ export function plainFigures(inputs: MatchInputs, setting: Setting, at: Point): 
   return {
     inputVolts: volts,
     outputVolts: out,
-    levelLossDecibels: -Math.abs(levelLossDecibels(loading)),
+    levelLossDecibels: levelLossDecibels(loading),
     overloadMarginDecibels: marginAt1kHz(setting, inputs, volts),
     worstMarginDecibels: margin('loud'),
     extremeMarginDecibels: margin('extreme'),
