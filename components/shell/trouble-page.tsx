@@ -19,10 +19,12 @@ export function TroublePage({ digest, tryAgain }: Props) {
         <button type="button" className="b pri" onClick={tryAgain}>
           Load again
         </button>
-        {/* A whole new page: what broke may be in the one at hand. */}
-        <button type="button" className="b" onClick={() => window.location.assign('/')}>
-          Go to the front page
-        </button>
+        {/* Asks for a whole new page: what broke may be in the one at hand. */}
+        <form action="/">
+          <button type="submit" className="b">
+            Go to the front page
+          </button>
+        </form>
       </div>
       {digest && <p className="note">Noted in our log under {digest}.</p>}
     </main>
