@@ -15,7 +15,7 @@ export const API_LIMIT: Limit = { name: 'api', perAddress: 60, together: 1200, s
  */
 export async function answerJson(request: Request, run: (context: Context) => object | Promise<object>): Promise<Response> {
   try {
-    const context = requestContext()
+    const context = await requestContext()
     await countRequest(context.db, API_LIMIT, { address: addressOf(request.headers), secret: env().appSecret })
     return Response.json(await run(context), { headers: { 'Cache-Control': 'no-store' } })
   } catch (trouble) {

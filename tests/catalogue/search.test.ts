@@ -6,6 +6,7 @@ import { leaflet } from '@/content/catalogue/cartridges/leaflet'
 import { openDatabase, type Database } from '@/db/client'
 import { migrateDatabase } from '@/db/migrate'
 import { catalogueEntries } from '@/db/schema/catalogue'
+import { VISITOR } from '@/lib/access/actor'
 import { findArms, findCartridges, findInputs, findLeads, findStepUps, getCartridge, getPreamp, listPreamps } from '@/lib/catalogue/queries'
 import { loadDemoCatalogue } from '@/lib/catalogue/load-demo'
 import { toColumns } from '@/lib/catalogue/rows'
@@ -37,7 +38,7 @@ beforeAll(() => {
   folder = mkdtempSync(join(tmpdir(), 'setdown-search-'))
   db = openDatabase(join(folder, 'catalogue.db'))
   migrateDatabase(db)
-  loadDemoCatalogue({ db, now: NOW })
+  loadDemoCatalogue({ db, actor: VISITOR, now: NOW })
   db.transaction((tx) => {
     for (const entry of [...MADE_UP, ...AWKWARD]) {
       tx.insert(catalogueEntries).values({ ...toColumns('cartridges', entry), demoHash: null, createdAt: NOW, updatedAt: NOW }).run()

@@ -7,6 +7,7 @@ import { openDatabase, type Database } from '@/db/client'
 import { migrateDatabase } from '@/db/migrate'
 import { catalogueEntries } from '@/db/schema/catalogue'
 import { revisions, sheets } from '@/db/schema/setups'
+import { VISITOR } from '@/lib/access/actor'
 import { loadDemoCatalogue } from '@/lib/catalogue/load-demo'
 import type { Context } from '@/lib/kernel/context'
 import { Fault } from '@/lib/kernel/errors'
@@ -35,7 +36,7 @@ const COIL: AnswersInput = { preamp: 'merrin-5', type: 'moving-coil', name: 'Bri
 
 let folder: string
 let db: Database
-const at = (now = NOW): Context => ({ db, now })
+const at = (now = NOW): Context => ({ db, actor: VISITOR, now })
 
 beforeEach(() => {
   folder = mkdtempSync(join(tmpdir(), 'setdown-sheets-'))

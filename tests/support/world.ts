@@ -1,5 +1,6 @@
 import { openDatabase, type Database } from '@/db/client'
 import { migrateDatabase } from '@/db/migrate'
+import { VISITOR } from '@/lib/access/actor'
 import type { Context } from '@/lib/kernel/context'
 
 /** Friday 6 March 2026, 10:30 UTC: the time it is in every test. */
@@ -27,5 +28,5 @@ export interface World {
 /** An empty, migrated database of a test's own, in memory. */
 export function world(): World {
   const db = openDatabase(migratedImage())
-  return { db, at: (now = NOW) => ({ db, now }) }
+  return { db, at: (now = NOW) => ({ db, actor: VISITOR, now }) }
 }

@@ -1,6 +1,6 @@
 import { SettingsError } from '@/lib/server/env'
 import { beat } from '@/lib/server/heartbeat'
-import { requestContext } from '@/lib/server/request-context'
+import { nobodysContext } from '@/lib/server/request-context'
 
 /** Never answered from a cache, nor while building. */
 export const dynamic = 'force-dynamic'
@@ -11,7 +11,7 @@ const answer = (status: number, body: object) =>
 /** 200 when the database takes a write and gives it back, 503 when it does not, 500 when the settings are wrong. */
 export function GET() {
   try {
-    beat(requestContext())
+    beat(nobodysContext())
     return answer(200, { status: 'ok', database: 'ok' })
   } catch (trouble) {
     if (trouble instanceof SettingsError) return answer(500, { status: 'settings', sentences: trouble.sentences })

@@ -23,7 +23,7 @@ export async function GET(request: Request, { params }: { params: Promise<{ kind
   const search = CatalogueSearch.safeParse({ ...asked, kind })
   if (!search.success) return answerFault(faultOfIssues(search.error))
   try {
-    return Response.json(findEntries(requestContext(), search.data), { headers: { 'Cache-Control': CACHE } })
+    return Response.json(findEntries(await requestContext(), search.data), { headers: { 'Cache-Control': CACHE } })
   } catch (trouble) {
     if (trouble instanceof Fault) return answerFault(trouble)
     throw trouble
