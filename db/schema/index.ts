@@ -1,4 +1,5 @@
 /** Every table, in one object: Drizzle wants it so. One line a domain. */
+export * from './accounts'
 export * from './catalogue'
 export * from './meta'
 export * from './setups'
