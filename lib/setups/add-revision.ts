@@ -1,4 +1,5 @@
 import 'server-only'
+import { permit } from '../access/permit'
 import type { Context } from '../kernel/context'
 import { Fault } from '../kernel/errors'
 import { reckon } from './reckon'
@@ -20,16 +21,16 @@ function letterAfter(letter: string): string {
  * Adds a revision to the sheet behind a code, reckoned now; earlier ones stay as they were. Where the newest one
  * says the same already, that one is it: a double press adds nothing.
  * @param change makes the answers out of those of the newest revision
- * @throws Fault not_found, bad_input, conflict
+ * @throws Fault not_found, bad_input, conflict; sign_in or not_allowed where an owner keeps it
  */
 export function addRevision(context: Context, code: string, change: (answers: AnswersInput) => AnswersInput): { code: string; letter: string } {
-  const { db, now } = context
-  const before = sheetByCode(db, code)
+  const { db, actor, now } = context
+  const before = permit(actor, 'sheet:change', sheetByCode(db, code))
   const answers = change(fromStored<AnswersInput>(revisionOf(db, before.id).answers))
   const reckoned = reckon(context, answers)
   return db.transaction(
     (tx) => {
-      const sheet = sheetByCode(tx, code)
+      const sheet = permit(actor, 'sheet:change', sheetByCode(tx, code))
       const newest = revisionOf(tx, sheet.id)
       if (saysTheSame(newest, reckoned)) return { code: sheet.code, letter: newest.letter }
       const letter = letterAfter(newest.letter)

@@ -1,30 +1,22 @@
 import 'server-only'
 import type { Context } from '../kernel/context'
+import type { UnknownName } from '../match/inputs'
 import { addRevision } from './add-revision'
 import type { AnswersInput } from './schema'
+import type { FoundNumberInput } from './schema-found'
 import { UNKNOWN_WORDS } from './sentences/unknowns'
-import type { UnknownName } from '../match/inputs'
 import { VALUE_FIELDS, type AnswerKey, type NumberField } from './terms'
-
-/** What was found, as typed. `meaning` and `velocity` come with an output. */
-export interface FoundNumber {
-  code: string
-  unknown: UnknownName
-  value?: string
-  velocity?: string
-  meaning?: string
-}
 
 /**
  * Takes the number that was found into the answers and reckons the sheet's next revision with it.
  * @throws Fault bad_input when it cannot be read; not_found; conflict after Z
  */
-export function answerNumber(context: Context, { code, unknown, ...found }: FoundNumber): { code: string; letter: string } {
+export function answerNumber(context: Context, { code, unknown, ...found }: FoundNumberInput): { code: string; letter: string } {
   return addRevision(context, code, (answers) => withFound(answers, unknown, found))
 }
 
 /** The answers with one value said outright, whatever was said about it before. */
-export function withFound(answers: AnswersInput, unknown: UnknownName, found: Omit<FoundNumber, 'code' | 'unknown'>): AnswersInput {
+export function withFound(answers: AnswersInput, unknown: UnknownName, found: Omit<FoundNumberInput, 'code' | 'unknown'>): AnswersInput {
   const { field } = UNKNOWN_WORDS[unknown]
   if (!field) return answers
   const { value, velocity, meaning } = found

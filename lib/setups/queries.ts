@@ -1,4 +1,5 @@
 import 'server-only'
+import { can, permit } from '../access/permit'
 import type { Context } from '../kernel/context'
 import { Fault } from '../kernel/errors'
 import type { MatchInputs } from '../match/inputs'
@@ -9,7 +10,7 @@ import type { AnswersInput } from './schema'
 import { fromStored } from './stored'
 import type { Changed, SheetResult, SheetView } from './views'
 
-type Reader = Pick<Context, 'db'>
+type Reader = Pick<Context, 'db' | 'actor'>
 
 /**
  * A sheet at one revision, the newest unless a letter is named. Whoever holds the code may read it; the number alone
@@ -17,7 +18,7 @@ type Reader = Pick<Context, 'db'>
  * @throws Fault not_found
  */
 export function getSheet(context: Reader, code: string, letter?: string): SheetView {
-  const sheet = sheetByCode(context.db, code)
+  const sheet = permit(context.actor, 'sheet:read', sheetByCode(context.db, code))
   const row = revisionOf(context.db, sheet.id, letter)
   return {
     number: sheet.number,
@@ -31,10 +32,11 @@ export function getSheet(context: Reader, code: string, letter?: string): SheetV
     rulesVersion: row.rulesVersion,
     engineVersion: row.engineVersion,
     changed: changedSince(context, row),
+    mayChange: can(context.actor, 'sheet:change', sheet),
   }
 }
 
-function changedSince(context: Reader, row: RevisionRow): Changed {
+function changedSince(context: Pick<Context, 'db'>, row: RevisionRow): Changed {
   const versions = { rules: row.rulesVersion !== RULES_VERSION, engine: row.engineVersion !== ENGINE_VERSION }
   try {
     const { inputs } = readInputs(context, fromStored<AnswersInput>(row.answers))

@@ -9,7 +9,6 @@ import type { Preamp } from '../match/preamp'
 import type { Evaluation, FindingCode, MatchResult } from '../match/result'
 import { toMatchInputs } from './inputs'
 import { Answers, AnswersInput, toQuery } from './schema'
-import { gainFromSockets } from './sentences/names'
 import type { Alternative } from './sentences/remedies'
 import { toStored } from './stored'
 import type { SheetResult } from './views'
@@ -102,7 +101,7 @@ function alternativesTo(context: Reader, inputs: MatchInputs, result: MatchResul
       const output = preamp.hasBalancedOutput ? inputs.output : 'unbalanced'
       const { verdict, chosen } = match({ ...inputs, preamp, present: null, output })
       if (!chosen || (verdict !== 'suits' && verdict !== 'suits-with-changes')) return []
-      return [{ modelName: name, verdict, gainDecibels: gainFromSockets(chosen.setting, preamp), roomDecibels: roomOf(chosen) }]
+      return [{ modelName: name, verdict, gainDecibels: chosen.setting.gainDecibels, roomDecibels: roomOf(chosen) }]
     })
     .sort((a, b) => b.roomDecibels - a.roomDecibels)
 }

@@ -51,6 +51,8 @@ export interface SheetView {
   rulesVersion: number
   engineVersion: string
   changed: Changed
+  /** False where an owner keeps it and someone else looks. */
+  mayChange: boolean
 }
 
 /** Which sheet an answer of the API belongs to. */

@@ -185,7 +185,7 @@ describe('revisions', () => {
   test('the number that was found makes the next revision, and the question is settled', () => {
     const { code } = saveSheet(at(), { answers: COIL })
     expect(getSheet(at(), code).result.match).toMatchObject({ verdict: 'cannot-say', next: { unknown: 'output' } })
-    const found = { code, unknown: 'output' as const, value: '0.4', velocity: '5', meaning: 'peak-lateral' }
+    const found = { code, unknown: 'output' as const, value: '0.4', velocity: '5' as const, meaning: 'peak-lateral' as const }
     expect(answerNumber(at(), found).letter).toBe('B')
     expect(answerNumber(at(), found).letter).toBe('B')
     const sheet = getSheet(at(), code)

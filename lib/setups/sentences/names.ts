@@ -1,6 +1,5 @@
 import type { MatchInputs, NextInput } from '../../match/inputs'
 import type { Preamp } from '../../match/preamp'
-import type { SettingSummary } from '../../match/result'
 
 /** The things of a sheet as its sentences call them. */
 export interface Names {
@@ -63,10 +62,4 @@ export function handleOf(preamp: Preamp, controlIds?: readonly string[]): Handle
   if (controls.length === 0) return null
   const handles = new Set(controls.map(({ kind }) => HANDLES[kind].one))
   return handles.size === 1 ? HANDLES[controls[0].kind] : SETTINGS
-}
-
-/** Gain from the sockets, in decibels: a built-in transformer counts in, as manuals print it. */
-export function gainFromSockets({ gainDecibels, pathId }: Pick<SettingSummary, 'gainDecibels' | 'pathId'>, { paths }: Preamp): number {
-  const ratio = paths.find(({ id }) => id === pathId)?.stepUp?.ratio.nominal ?? 1
-  return gainDecibels + 20 * Math.log10(ratio)
 }

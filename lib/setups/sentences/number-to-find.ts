@@ -3,7 +3,7 @@ import type { MatchResult, NumberToFindNext, Stretch } from '../../match/result'
 import { statesEqual } from '../../match/states'
 import { amount, figureText, gainText, sentenceCase } from '../format'
 import { VERDICT_SHORT } from './short-verdicts'
-import { gainFromSockets, namesOf } from './names'
+import { namesOf } from './names'
 import { inDimension, UNKNOWN_WORDS } from './unknowns'
 
 /** The one value that would do most to settle the verdict, in words. */
@@ -108,7 +108,7 @@ const BECAUSE: Partial<Record<string, string>> = {
 /** What holds in one stretch: short verdict and what to do there. */
 export function stretchWords({ verdict, setting, finding }: Stretch, { preamp, present }: MatchInputs): { verdict: string; todo: string } {
   const because = finding ? BECAUSE[finding] : undefined
-  const gain = setting ? gainText(gainFromSockets(setting, preamp)) : ''
+  const gain = setting ? gainText(setting.gainDecibels) : ''
   const stands = setting && present && statesEqual(present.left, setting.state) && statesEqual(present.right, setting.state)
   const at = !setting ? '' : preamp.controls.length === 0 ? '' : stands ? `as it is set now, ${gain}` : `gain ${gain}`
   const todo = verdict === 'does-not-suit' ? (because ?? 'Nothing fits') : [because, at].filter(Boolean).join('; ')

@@ -5,7 +5,6 @@ import { describeGroup, ohmsInWords } from '../../match/setting-words'
 import type { MatchResult, Move, OtherSetting, SettingSummary } from '../../match/result'
 import { added, decibels, figureText, gainText, listed, roomRange, sentenceCase, voltsText } from '../format'
 import { findingClause } from './findings'
-import { gainFromSockets } from './names'
 
 /** One other setting as a row: what it is, what it comes to, why or why not. */
 export interface OtherRow {
@@ -97,7 +96,7 @@ function bankWords(moves: readonly Move[], stands: string | undefined): string[]
 function comesTo(chosen: SettingSummary, { setting, outputVolts }: OtherSetting, inputs: MatchInputs): string {
   const words: Record<Difference, () => string> = {
     input: () => `${inputs.preamp.paths.find(({ id }) => id === setting.pathId)?.label ?? setting.pathId.toUpperCase()} input`,
-    gain: () => `${gainText(gainFromSockets(setting, inputs.preamp))}, ${voltsText(outputVolts)} RMS`,
+    gain: () => `${gainText(setting.gainDecibels)}, ${voltsText(outputVolts)} RMS`,
     load: () => loadWords(setting, inputs),
     capacitance: () => totalFarads(setting, inputs),
     filter: () => (setting.filter ? 'Rumble filter' : 'No rumble filter'),

@@ -240,3 +240,8 @@ export function inDimension(unknown: UnknownName, si: number): number {
   const { dimension } = UNKNOWN_WORDS[unknown]
   return dimension === 'grams' || dimension === 'compliance' ? si * 1e3 : si
 }
+
+/** A value of the unknown in the unit beside its box. */
+export function inDisplayUnit(unknown: UnknownName, si: number): number {
+  return si / UNKNOWN_WORDS[unknown].size
+}

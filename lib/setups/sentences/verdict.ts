@@ -165,3 +165,10 @@ function leadOfNo({ inputs, result, alternatives }: VerdictFacts): string[] {
   const would = alternatives[0] && finding ? alternativeSentence(alternatives[0], finding.code) : ''
   return [why, would, others].filter(Boolean)
 }
+
+/** What the middle line of the treble is called: "after the two moves". */
+export function afterMovesLabel({ moves }: MatchResult): string {
+  if (!moves || moves.length === 0) return ''
+  const count = countMoves(moves)
+  return count === 1 ? 'after the move' : `after the ${countWord(count)} moves`
+}

@@ -1,0 +1,29 @@
+import { CautionBox } from '../shell/caution-box'
+import { tied } from '@/lib/setups/format'
+
+interface Props {
+  heading: string
+  sentences: readonly string[]
+  /** True where doing it means moving a plug. */
+  plugs: boolean
+}
+
+/** What would do it. Where that moves a plug, its caution comes first. */
+export function RemediesList({ heading, sentences, plugs }: Props) {
+  return (
+    <section className="rem-w">
+      {plugs && <CautionBox act="plug" />}
+      <div className="fig rem">
+        <div className="say">
+          <span className="fn">What would do</span>
+          <h2>{heading}</h2>
+        </div>
+        <ul className="plain">
+          {sentences.map((sentence) => (
+            <li key={sentence}>{tied(sentence)}</li>
+          ))}
+        </ul>
+      </div>
+    </section>
+  )
+}

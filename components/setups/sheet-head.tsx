@@ -1,0 +1,37 @@
+import type { ReactNode } from 'react'
+import { sheetRow, titleRows } from '@/lib/setups/sentences/title-block'
+import { verdictLead, verdictTitle } from '@/lib/setups/sentences/verdict'
+import type { SheetView } from '@/lib/setups/views'
+import { RevisionNotes } from './revision-notes'
+import type { SheetParts } from './sheet-parts'
+import { TitleBar, TitleBlock } from './title-block'
+import { VerdictHead } from './verdict-head'
+
+interface Props extends SheetParts {
+  /** Under the verdict, beside the title block. */
+  children?: ReactNode
+}
+
+/** Verdict and title block, with the revisions above them where there are several. */
+export function SheetHead({ sheet, paths, address, actions, children }: Props) {
+  const { inputs, result } = sheet
+  const facts = { inputs, result: result.match, alternatives: result.alternatives }
+  const rows = [...titleRows(inputs), sheetRow(sheet)]
+  return (
+    <>
+      <RevisionNotes {...sheet} model={inputs.preamp.modelName} computeAnew={actions.computeAnew} />
+      <section className="ver2">
+        <div>
+          <VerdictHead verdict={result.match.verdict} title={verdictTitle(facts)} lead={verdictLead(facts)} />
+          {children}
+        </div>
+        <TitleBlock rows={rows} changePath={paths.change} address={address} sharesFirst={!asksForMoves(sheet)} />
+      </section>
+      <TitleBar rows={rows} />
+    </>
+  )
+}
+
+function asksForMoves({ result: { match } }: SheetView): boolean {
+  return match.gate === null && match.verdict !== 'does-not-suit' && match.moves?.length !== 0
+}

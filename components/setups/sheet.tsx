@@ -1,0 +1,44 @@
+import type { SheetView } from '@/lib/setups/views'
+import { FullSheet } from './full-sheet'
+import { GateSheet } from './gate-sheet'
+import { KeepIt } from './keep-it'
+import { OpenSheet } from './open-sheet'
+import { PaperFoot, PROMISE } from './paper'
+import type { SheetActions } from './sheet-actions'
+import { adviceOf, pathsOf } from './sheet-facts'
+import { WhatIfSheet } from './what-if'
+import { WhatNext } from './what-next'
+
+interface Props {
+  sheet: SheetView
+  /** Scheme and host of this service. */
+  origin: string
+  actions: SheetActions
+}
+
+/** A set-up sheet, in the order in which an owner needs it. */
+export function Sheet({ sheet, origin, actions }: Props) {
+  const { inputs, number, code, rulesVersion } = sheet
+  const address = `${origin}/sheets/${code}`
+  const paths = pathsOf(sheet)
+  const advice = adviceOf(sheet)
+  const parts = { sheet, paths, address, actions }
+  return (
+    <main id="main" className="w sheet">
+      {!advice ? (
+        <GateSheet {...parts} />
+      ) : (
+        <WhatIfSheet key={`${code} ${sheet.letter}`} inputs={inputs} advice={advice}>
+          {sheet.result.match.verdict === 'cannot-say' ? <OpenSheet {...parts} advice={advice} /> : <FullSheet {...parts} advice={advice} />}
+        </WhatIfSheet>
+      )}
+      <KeepIt number={number} code={code} address={address} makeNewCode={sheet.mayChange ? actions.makeNewCode : null} />
+      <WhatNext changePath={paths.change} anotherCartridgePath={paths.anotherCartridge} />
+      <p className="prm no-p">
+        {PROMISE} Rules, version {rulesVersion}.
+      </p>
+      <PaperFoot {...sheet} address={address} />
+    </main>
+  )
+}
+

@@ -1,0 +1,110 @@
+import Link from 'next/link'
+import { CautionBox } from '../shell/caution-box'
+import { MoveList } from '../panel/move-list'
+import { cautionFor } from '../panel/move-words'
+import { PanelDrawing } from '../panel/panel-drawing'
+import type { ControlState, Positions } from '@/lib/match/controls'
+import type { Preamp } from '@/lib/match/preamp'
+import type { Move } from '@/lib/match/result'
+import { SheetForm } from './sheet-form'
+import type { SheetAction } from './sheet-actions'
+import { TryPanel } from './try-panel'
+
+interface Props {
+  preamp: Preamp
+  present: Positions | null
+  target: ControlState
+  /** Null when nobody knows how the unit stands: then the whole end state is asked for. */
+  moves: Move[] | null
+  label: string
+  /** Under the moves, such as how to bring the volume up. */
+  after?: string
+  code: string
+  markMoved: SheetAction
+  /** Where to say how they stand now. */
+  tellPath: string
+  /** True at the newest revision: only that one can be acted on. */
+  canAct: boolean
+}
+
+/** For the owner behind the preamp: the caution in view, the moves in words, the panel with what to move. */
+export function SwitchCard(props: Props) {
+  const { preamp, present, target, moves, label } = props
+  const act = cautionFor(moves, preamp)
+  const words = <MoveList preamp={preamp} moves={moves} target={target} />
+  if (!act) {
+    return (
+      <section className="fig f1">
+        <div className="say">
+          <span className="fn">{label}</span>
+          {words}
+        </div>
+        <Drawing {...props} />
+      </section>
+    )
+  }
+  const done = props.canAct && moves && moves.length > 0
+  return (
+    <section className="f1w">
+      <CautionBox act={act} dock />
+      <div className="fig f1">
+        <div className="say">
+          <span className="fn">{label}</span>
+          {words}
+          {props.after && <p className="then">{props.after}</p>}
+          {done && (
+            <div className="d-only no-p">
+              <Moved {...props} />
+            </div>
+          )}
+        </div>
+        <Drawing {...props}>
+          {done && (
+            <div className="m-only no-p">
+              <Moved {...props} />
+            </div>
+          )}
+          {moves === null && present === null && (
+            <figcaption className="no-p">
+              Nothing is marked as a move. <Link href={props.tellPath}>Tell us how they stand now</Link> and we mark only those.
+            </figcaption>
+          )}
+        </Drawing>
+      </div>
+    </section>
+  )
+}
+
+function Moved({ code, markMoved }: Props) {
+  return (
+    <>
+      <SheetForm action={markMoved} code={code} button="b pri moved">
+        I have moved them
+      </SheetForm>
+      <p className="note">Starts the next revision from there. This one is kept, so you can go back.</p>
+    </>
+  )
+}
+
+function Drawing({ preamp, present, target, moves, children }: Props & { children?: React.ReactNode }) {
+  const marked = moves !== null && moves.length > 0
+  const front = preamp.controls.some(({ place }) => place === 'front')
+  return (
+    <figure>
+      <div className="panelwrap">
+        <div className="no-p">
+          <TryPanel present={present} target={target} />
+        </div>
+        <div className="p-only">
+          <PanelDrawing preamp={preamp} present={present} target={target} width={590} print />
+        </div>
+      </div>
+      <figcaption>
+        {front ? 'Seen from the front. ' : 'Seen from behind. '}
+        {marked && 'Filled: move it there. Dashed: where it is now. '}
+        {preamp.controls.length > 0 && <span className="no-p">Press a drawn one to try it out.</span>}
+      </figcaption>
+      {children}
+    </figure>
+  )
+}
