@@ -16,6 +16,13 @@ export default defineConfig({
     include: ['tests/**/*.test.{ts,tsx}'],
     exclude: ['tests/pages/**', 'node_modules/**'],
     environment: 'node',
+    // Settings for whatever asks for them. The folder cannot be made, so nothing opens a real database by mistake.
+    env: {
+      DATA_DIR: '/dev/null/setdown',
+      PUBLIC_ADDRESS: 'http://localhost:3000',
+      APP_SECRET: 'known-to-every-test-and-so-to-nobody-else',
+      LOG_LEVEL: 'silent',
+    },
     setupFiles: ['tests/support/setup.ts'],
   },
 })
