@@ -1,5 +1,5 @@
 import { blob, index, integer, sqliteTable, text } from 'drizzle-orm/sqlite-core'
-import { ROLES, TOKEN_PURPOSES } from '../../lib/accounts/terms'
+import { ROLES, SIGN_IN_WAYS, TOKEN_PURPOSES } from '../../lib/accounts/terms'
 import { milliseconds } from './columns'
 
 const flag = (name: string) => integer(name, { mode: 'boolean' })
@@ -43,6 +43,7 @@ export const sessions = sqliteTable(
     lastSeenAt: milliseconds('last_seen_at').notNull(),
     expiresAt: milliseconds('expires_at').notNull(),
     endedAt: milliseconds('ended_at'),
+    way: text('way', { enum: SIGN_IN_WAYS }).notNull().default('password'),
     /** In words: "Firefox on Linux". */
     device: text('device').notNull(),
     /** Shortened, so that it says where about and not which connection. */

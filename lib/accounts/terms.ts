@@ -23,6 +23,20 @@ export const TOKEN_LASTS_MS: Record<TokenPurpose, number> = {
   invite: 7 * DAY,
 }
 
+/** The page that each link opens. It shows a button: opening a page must not use a link up. */
+export const TOKEN_PATHS: Record<TokenPurpose, string> = {
+  confirm: '/confirm-email',
+  link: '/link',
+  reset: '/reset-password/new',
+  'change-address-old': '/change-address/old',
+  'change-address-new': '/change-address/new',
+  invite: '/invitation',
+}
+
+/** How someone came in. */
+export const SIGN_IN_WAYS = ['password', 'link', 'invitation'] as const
+export type SignInWay = (typeof SIGN_IN_WAYS)[number]
+
 /** After this a session ends, however much it was used. Staff see other people's mail, so theirs is shorter. */
 export const SESSION_LASTS_MS: Record<Role, number> = { owner: 30 * DAY, staff: 7 * DAY, admin: 7 * DAY }
 

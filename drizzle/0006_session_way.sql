@@ -1,0 +1,1 @@
+ALTER TABLE `sessions` ADD `way` text DEFAULT 'password' NOT NULL;
