@@ -5,7 +5,7 @@ import { choiceOf } from './answers'
 import type { RawAnswers } from './field-reading'
 import { withMarks } from './leaflet'
 import { figureAnswers, leafletAnswers, type Filled } from './picked-values'
-import type { ComplianceCondition, Meaning, ValueField } from './terms'
+import type { ComplianceCondition, Meaning, NumberField, ValueField } from './terms'
 
 /**
  * What choosing an entry of the catalogue answers. Values come as the leaflet prints them and are marked as such;
@@ -65,7 +65,7 @@ export function answersFromCartridge(view: CartridgeView, answers: RawAnswers = 
   }
   const type = choiceOf(names)
   const usual = typicalCartridge(magnetic ? view.type : 'unknown')
-  const value = (field: ValueField, leaflet: LeafletField | null, ends = { low: 0, high: Infinity }) =>
+  const value = (field: Exclude<ValueField, 'ratio'>, leaflet: LeafletField | null, ends = { low: 0, high: Infinity }) =>
     magnetic ? leafletAnswers(field, leaflet, { type, ends }) : null
   // Printed for the preamp alone it is not the total that a check compares, and the rest is not known here.
   const capacitance = view.loadPicofarads?.means === 'preamp-only' ? null : view.loadPicofarads
@@ -114,30 +114,20 @@ export function answersFromStepUp(view: StepUpView, tap: StepUpView['taps'][numb
   })
 }
 
-const WIRE_KEYS = {
-  lead: { as: 'leadAs', metres: 'leadMetres', perMetre: 'leadPerMetre' },
-  cable: { as: 'cableAs', metres: 'cableMetres', perMetre: 'cablePerMetre' },
-} as const
-
-/** A lead or cable of one of its lengths. Where no capacitance is printed only the length is filled in. */
-export function answersFromLead(
-  which: 'lead' | 'cable',
-  view: LeadView,
-  length: LeadView['lengths'][number],
-  answers: RawAnswers = {},
-): RawAnswers {
-  const keys = WIRE_KEYS[which]
-  const names: RawAnswers = which === 'lead' ? { leadName: `${view.name}, ${length.metres} m`, leadId: view.id } : {}
+/** An arm lead of one of its lengths. Where no capacitance is printed only the length is filled in. */
+export function answersFromLead(view: LeadView, length: LeadView['lengths'][number], answers: RawAnswers = {}): RawAnswers {
   const perMetre = view.picofaradsPerMetre
   const whole = !perMetre && length.picofarads
   const values: RawAnswers = {
-    [keys.as]: whole ? 'whole' : 'metres',
-    [which]: whole ? figureAnswers(which, whole)[which] : '',
-    [keys.metres]: String(length.metres),
-    [keys.perMetre]: perMetre ? figureAnswers(keys.perMetre, perMetre)[keys.perMetre] : '',
+    leadName: `${view.name}, ${length.metres} m`,
+    leadId: view.id,
+    leadAs: whole ? 'whole' : 'metres',
+    lead: whole ? figureAnswers('lead', whole).lead : '',
+    leadMetres: String(length.metres),
+    leadPerMetre: perMetre ? figureAnswers('leadPerMetre', perMetre).leadPerMetre : '',
   }
-  const said = whole ? [which] : perMetre ? [keys.metres, keys.perMetre] : [keys.metres]
-  return withMarks({ ...answers, ...names, ...values }, said, [which, keys.metres, keys.perMetre])
+  const said: NumberField[] = whole ? ['lead'] : perMetre ? ['leadMetres', 'leadPerMetre'] : ['leadMetres']
+  return withMarks({ ...answers, ...values }, said, ['lead', 'leadMetres', 'leadPerMetre'])
 }
 
 export function answersFromInput(view: InputView, answers: RawAnswers = {}): RawAnswers {

@@ -24,12 +24,12 @@ export const Answers = AnswersInput.transform((input, context) => {
 export type Answers = ReadAnswers
 
 /** Whatever of it are answers; texts that are too long are cut, everything else is kept as typed. Never refuses. */
-export function answersFrom(values: Record<string, string | string[] | undefined>): AnswersInput {
+export function answersFrom(values: Readonly<Record<string, unknown>>): AnswersInput {
   const answers: AnswersInput = {}
   for (const key of ANSWER_KEYS) {
     const value = values[key]
-    const text = Array.isArray(value) ? value.at(-1) : value
-    if (text !== undefined && text !== '') answers[key] = text.slice(0, limitOf(key))
+    const text: unknown = Array.isArray(value) ? value.at(-1) : value
+    if (typeof text === 'string' && text !== '') answers[key] = text.slice(0, limitOf(key))
   }
   return answers
 }

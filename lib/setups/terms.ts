@@ -20,6 +20,7 @@ export type VelocityChoice = (typeof VELOCITIES)[number]
 export const ASKED_MEANINGS = ['peak-lateral', 'rms-lateral', 'peak-channel', 'rms-channel', 'not-said'] as const
 /** A leaflet in the catalogue may say one half of it and not the other. */
 export const HALF_MEANINGS = ['peak', 'rms', 'lateral', 'channel'] as const
+export type HalfMeaning = (typeof HALF_MEANINGS)[number]
 export const MEANINGS = [...ASKED_MEANINGS, ...HALF_MEANINGS] as const
 export type Meaning = (typeof MEANINGS)[number]
 
@@ -175,6 +176,9 @@ export const STEP_KEYS: Record<Step, readonly AnswerKey[]> = {
     ...withRange(['nextMax', 'nextLoad']),
   ],
 }
+
+/** Answers that no box shows: which entry of the catalogue a name was taken from. */
+export const ENTRY_KEYS: readonly AnswerKey[] = ['cart', 'armId', 'leadId', 'stepUpId', 'nextId']
 
 /** What a choice stands at before anyone touched it; not written into links. */
 export const DEFAULT_ANSWERS: Partial<Record<AnswerKey, string>> = {

@@ -1,8 +1,8 @@
-import { choiceOf, readAnswers } from './answers'
+import { choiceOf, readAnswers, type Answers } from './answers'
 import type { RawAnswers, Trouble } from './field-reading'
 import { counted, sentenceCase } from './format'
 import { TYPE_WORDS } from './sentences/title-block'
-import { STEP_KEYS, STEPS, type NextKind, type Step } from './terms'
+import { STEP_KEYS, STEPS, type CartridgeChoice, type NextKind, type Step } from './terms'
 
 /** The four steps as their names, and where each stands. */
 export const STEP_NAMES: Record<Step, string> = {
@@ -72,4 +72,9 @@ function answerLines(raw: RawAnswers, modelName: string | null): Record<Step, st
     arm: [arm.name, lead].filter(Boolean).join(', '),
     'plays-into': next.name || (raw.next ? NEXT[next.kind] : ''),
   }
+}
+
+/** All answers read at once, with the type that the form goes by. */
+export function readForm(raw: RawAnswers): { answers: Answers; type: CartridgeChoice; troubles: Trouble[] } {
+  return { ...readAnswers(raw), type: choiceOf(raw) }
 }

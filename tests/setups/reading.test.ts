@@ -11,7 +11,7 @@ import { written, writtenRange } from '@/lib/setups/units'
 
 const MAGNET: CartridgeChoice = 'moving-magnet'
 const COIL: CartridgeChoice = 'moving-coil'
-const read = (field: NumberField, text: string, type = MAGNET, others: RawAnswers = {}) =>
+const read = (field: NumberField, text: string, type: CartridgeChoice = MAGNET, others: RawAnswers = {}) =>
   readField(field, { [field]: text, ...others }, type)
 
 describe('one value', () => {
