@@ -21,7 +21,7 @@ export function listedNumbers(numbers: readonly number[]): string {
     if (last && last[last.length - 1] === number - 1) last.push(number)
     else runs.push([number])
   }
-  return listed(runs.flatMap((run) => (run.length > 2 ? [`${run[0]} to ${run[run.length - 1]}`] : run)))
+  return listed(runs.flatMap((run): (string | number)[] => (run.length > 2 ? [`${run[0]} to ${run[run.length - 1]}`] : run)))
 }
 
 /** A label inside a sentence: "Load" is "load", "MC load" stays. */
