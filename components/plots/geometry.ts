@@ -23,9 +23,11 @@ export interface PlotForm {
   print?: boolean
 }
 
+const [NARROWEST, WIDEST] = [240, 4000]
+
 /** The width a plot is really drawn for: whole pixels, and never so few that the margins meet. */
 export function drawnWidth(width: number): number {
-  return Number.isFinite(width) ? Math.max(240, Math.floor(width)) : 240
+  return Number.isFinite(width) ? clamp(Math.floor(width), NARROWEST, WIDEST) : NARROWEST
 }
 
 export function plotFrame(

@@ -1,13 +1,16 @@
 /** Words for the numbers on a drawing. A true minus sign, a space before the unit, no "−0". */
 
+/** Beyond this a number is no level and no frequency, and sums of such would overflow. */
+const LARGEST = 1e9
+
 /** The value when it can be drawn, else null. */
 export function finite(value: number | null | undefined): number | null {
-  return typeof value === 'number' && Number.isFinite(value) ? value : null
+  return typeof value === 'number' && Math.abs(value) <= LARGEST ? value : null
 }
 
 /** The range when all three of its values can be drawn, else null. */
 export function finiteRange(range: { low: number; nominal: number; high: number } | null) {
-  return range && [range.low, range.nominal, range.high].every(Number.isFinite) ? range : null
+  return range && [range.low, range.nominal, range.high].every((value) => finite(value) !== null) ? range : null
 }
 
 export function clamp(value: number, low: number, high: number): number {
@@ -57,7 +60,8 @@ export function spanText(low: number, high: number, decimals = 1): string {
 
 /** A display number as it stands on an axis: thousands set apart from 10 000 up, no trailing noise. */
 export function plainNumber(value: number): string {
-  const rounded = Number(value.toPrecision(4))
+  // Rounding the largest numbers there are would make them infinite.
+  const rounded = Math.abs(value) < 1e15 ? Number(value.toPrecision(4)) : value
   const [whole = '0', part] = String(Math.abs(rounded)).split('.')
   const spaced = whole.length > 4 && !whole.includes('e') ? whole.replace(/\B(?=(\d{3})+$)/g, '\u00a0') : whole
   return `${rounded < 0 ? '−' : ''}${spaced}${part ? `.${part}` : ''}`

@@ -1,4 +1,5 @@
 import type { Spot } from './geometry'
+import { finite } from './numbers'
 
 /** Reading values off a curve given as arrays. */
 
@@ -11,12 +12,12 @@ export function valueAt(hertz: readonly number[], values: readonly number[] | nu
   for (let i = 0; i < hertz.length; i++) {
     const [f, value] = [hertz[i], values[i]]
     if (f === undefined || value === undefined || !(f > 0) || !Number.isFinite(value)) continue
-    if (f === at) return value
+    if (f === at) return finite(value)
     const [f0, value0] = [hertz[i - 1], values[i - 1]]
     if (f0 === undefined || value0 === undefined || !(f0 > 0) || !Number.isFinite(value0)) continue
     if (f0 < at && at < f) {
       const part = Math.log(at / f0) / Math.log(f / f0)
-      return Number.isFinite(part) ? value0 + (value - value0) * part : null
+      return finite(value0 + (value - value0) * part)
     }
   }
   return null

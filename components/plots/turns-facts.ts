@@ -1,4 +1,4 @@
-import { plainNumber } from './numbers'
+import { clamp, plainNumber } from './numbers'
 
 export type TurnVerdict = 'suits' | 'changes' | 'limit' | 'no' | 'unsure'
 
@@ -66,10 +66,18 @@ export function stretchText({ from, to }: TurnStretch, { min, max, unit }: Turns
   return `${plainNumber(from)} to ${plainNumber(to)} ${unit}`
 }
 
+/** Where the unknown may be, held to the axis; all of it while an end is not known. */
+export function whereabouts({ min, max, low, high }: Turns): { low: number; high: number } {
+  const [from, to] = [Number.isFinite(low) ? low : min, Number.isFinite(high) ? high : max]
+  return { low: clamp(Math.min(from, to), min, max), high: clamp(Math.max(from, to), min, max) }
+}
+
 export function turnsSentence(turns: Turns): string {
-  const { low, high, unit } = turns
+  const { unit } = turns
+  const { low, high } = whereabouts(turns)
   const stretches = joinedStretches(turns)
     .map((stretch) => `${stretchText(stretch, turns)}: ${TURN_WORDS[stretch.verdict]}${stretch.text ? `, ${stretch.text}` : ''}`)
-    .join('. ')
-  return `Where our advice changes. It is somewhere from ${plainNumber(low)} to ${plainNumber(high)} ${unit}. ${stretches}.`
+    .map((sentence) => ` ${sentence}.`)
+    .join('')
+  return `Where our advice changes. It is somewhere from ${plainNumber(low)} to ${plainNumber(high)} ${unit}.${stretches}`
 }

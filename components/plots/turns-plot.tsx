@@ -10,7 +10,7 @@ import { usePlotId } from './plot-id'
 import { PlotSvg } from './plot-svg'
 import { textWidth, wrapText } from './text-width'
 import type { Turns, TurnStretch, TurnVerdict } from './turns-facts'
-import { joinedStretches, stretchText, TURN_WORDS, turnsSentence } from './turns-facts'
+import { joinedStretches, stretchText, TURN_WORDS, turnsSentence, whereabouts } from './turns-facts'
 
 const HEIGHT = 150
 const AXIS = 30
@@ -52,7 +52,7 @@ export function TurnsPlot(props: Turns & PlotForm) {
   const width = drawnWidth(props.width)
   const stretches = joinedStretches(props)
   const x = axisOver(props, 2, width - 2)
-  const drawn = { turns: props, stretches, id, width, print }
+  const drawn = { turns: { ...props, ...whereabouts(props) }, stretches, id, width, print }
   const holds = (stretch: TurnStretch) => {
     const space = x(stretch.to) - x(stretch.from) - 16
     const title = 28 + textWidth(TURN_WORDS[stretch.verdict], { size: TITLE_SIZE, bold: true })

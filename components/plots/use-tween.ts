@@ -14,7 +14,7 @@ const easeOut = (part: number) => 1 - (1 - part) ** 3
  * @param part 0 gives `from`, 1 gives `to`
  */
 export function blend<T>(from: T, to: T, part: number): T {
-  return blendAny(from, to, part) as T
+  return part === 1 ? to : (blendAny(from, to, part) as T)
 }
 
 function blendAny(from: unknown, to: unknown, part: number): unknown {
