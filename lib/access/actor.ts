@@ -3,6 +3,8 @@ import type { Role } from '@/lib/accounts/terms'
 /** Someone who is not signed in, or whose session no longer counts. */
 export interface Visitor {
   kind: 'visitor'
+  /** Gave a password or a link that was right, and still owes the code from the authenticator. Counts for nothing else. */
+  awaitsCode?: { personId: string; sessionId: string }
 }
 
 /** Someone who is signed in, as the session's row and the person's row say at this moment. */
