@@ -1,6 +1,7 @@
 import 'server-only'
 import { join } from 'node:path'
 import { z } from 'zod'
+import { checkMailSettings, MAIL_FIELDS, toMailEnv, type MailEnv } from './env-mail'
 
 const SECRET_LENGTH = 32
 /** The secret of `.env.example` runs on a desk, and must not guard anything in earnest. */
@@ -19,13 +20,14 @@ const Settings = z.object({
   LOG_LEVEL: z
     .enum(['silent', 'error', 'warn', 'info', 'debug'], 'LOG_LEVEL must be silent, error, warn, info or debug.')
     .default('info'),
+  ...MAIL_FIELDS,
 })
 
 /** An example secret is refused where the address says that strangers can reach it. */
 const CheckedSettings = Settings.refine(
   (settings) => isLocal(settings.PUBLIC_ADDRESS) || !EXAMPLE_SECRET.test(settings.APP_SECRET),
   'APP_SECRET is still the one of .env.example. Anyone can read that one: make your own.',
-)
+).superRefine(checkMailSettings)
 
 export interface Env {
   dataFolder: string
@@ -34,6 +36,7 @@ export interface Env {
   publicAddress: string
   appSecret: string
   logLevel: z.infer<typeof Settings>['LOG_LEVEL']
+  mail: MailEnv
 }
 
 /** Thrown where the settings are wrong; `sentences` says for each what is wrong and what would do. */
@@ -58,6 +61,7 @@ export function parseEnv(source: Record<string, string | undefined>): Env {
     publicAddress: new URL(PUBLIC_ADDRESS).origin,
     appSecret: APP_SECRET,
     logLevel: LOG_LEVEL,
+    mail: toMailEnv(parsed.data),
   }
 }
 

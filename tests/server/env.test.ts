@@ -26,6 +26,7 @@ test('good settings are read, with the database inside the data folder', () => {
     publicAddress: 'http://localhost:3000',
     appSecret: 'x'.repeat(32),
     logLevel: 'warn',
+    mail: { from: { name: 'Oskerby Audio Works', address: 'workshop@oskerby.example' }, smtp: null },
   })
 })
 
