@@ -45,7 +45,7 @@ export function ArmFields() {
   const { initial, raw, field } = useCheckForm()
   return (
     <>
-      <FieldRow id="arm-f" question="Arm" help="Or the deck, where the arm belongs to it.">
+      <FieldRow id="arm" question="Arm" help="Or the deck, where the arm belongs to it.">
         <LookUp<ArmView>
           kind="arms"
           name="arm"

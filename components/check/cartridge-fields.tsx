@@ -60,7 +60,7 @@ export function CartridgeFields() {
   const filled = Boolean(raw.mass || raw.compliance || raw.force || raw.mono === 'yes')
   return (
     <div className="crt">
-      <FieldRow id="name-f" question="Name">
+      <FieldRow id="name" question="Name">
         <LookUp<CartridgeView>
           kind="cartridges"
           name="name"
@@ -119,12 +119,12 @@ function TypeField() {
 function ComplianceAt() {
   const { initial, field } = useCheckForm()
   return (
-    <>
+    <div className="spd">
       <span className="lab at" aria-hidden="true">
         at
       </span>
       <Choice label="Measured at" options={CONDITIONS} value={initial.complianceAt} field={field('complianceAt')} />
-    </>
+    </div>
   )
 }
 

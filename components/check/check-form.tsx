@@ -32,6 +32,8 @@ export interface CheckFormProps {
   made: { query: string; view: SoFarView }
   /** True when the server was asked to go on and could not: everything wrong is shown at once. */
   showAll: boolean
+  /** True when more sheets came from here in a minute than are made. */
+  mustWait: boolean
   /** Where the form goes without script; on the last step the verb that saves the sheet. */
   send: string | ((answers: FormData) => Promise<void>)
   /** Stays the same for one filled-in form, so that pressing twice makes one sheet. */
@@ -39,7 +41,7 @@ export interface CheckFormProps {
   children: React.ReactNode
 }
 
-export function CheckFormPage({ step, heading, lead, next, models, made, showAll, send, sendKey, children }: CheckFormProps) {
+export function CheckFormPage({ step, heading, lead, next, models, made, showAll, mustWait, send, sendKey, children }: CheckFormProps) {
   const router = useRouter()
   const address = useSearchParams()
   const [initial] = useState(() => fromQuery(address.toString()))
@@ -108,6 +110,11 @@ export function CheckFormPage({ step, heading, lead, next, models, made, showAll
             {onLast && elsewhere.length > 0 && (
               <p className="note" role="status">
                 {STEP_NAMES[stepOf(elsewhere[0])]} has a value to put right before the sheet can be made.
+              </p>
+            )}
+            {mustWait && (
+              <p className="note" role="alert">
+                That is more than we answer in a minute. Wait a minute, then send again.
               </p>
             )}
             <LostConnection lost={lost} again={next} />

@@ -40,7 +40,7 @@ export function LookUp<View>({
   return (
     <div className="lookup">
       <Combobox
-        id={name}
+        id={`${name}-box`}
         label={label}
         value={initial[name]}
         field={field(name)}

@@ -33,12 +33,12 @@ const HALVES: Record<HalfMeaning, string> = {
 export function OutputField() {
   const { initial, field } = useCheckForm()
   const speed = (
-    <>
+    <div className="spd">
       <span className="lab at" aria-hidden="true">
         at
       </span>
       <Choice label="Groove speed beside the output" options={SPEEDS} value={initial.velocity} field={field('velocity')} wrap />
-    </>
+    </div>
   )
   return (
     <ValueField

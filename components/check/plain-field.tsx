@@ -12,7 +12,7 @@ export function PlainBox({ field, label }: { field: Field; label: string }) {
   const { unit, trouble } = fieldView(field, raw, answers, type)
   return (
     <UnitBox
-      id={field}
+      id={`${field}-box`}
       label={label}
       unit={unit}
       value={initial[field]}

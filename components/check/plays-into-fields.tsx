@@ -40,14 +40,14 @@ export function PlaysIntoFields({ hasBalancedOutput }: { hasBalancedOutput: bool
   return (
     <div className="nxi">
       <FieldRow id="next" question="What is it?" help="The input that the preamp's cable goes to.">
-        <Choice label="What is it?" options={KINDS} value={initial.next} field={field('next')} wrap />
+        <Choice label="What is it?" options={KINDS} value={initial.next} field={field('next')} wrap="three" />
         <div aria-live="polite">
           {raw.next === 'phono' && (
             <p className="note">That makes two phono stages in a row. You can go on, and the sheet says what it does.</p>
           )}
         </div>
       </FieldRow>
-      <FieldRow id="nextName-f" question="Name">
+      <FieldRow id="nextName" question="Name">
         <LookUp<InputView>
           kind="inputs"
           name="nextName"
@@ -67,7 +67,7 @@ export function PlaysIntoFields({ hasBalancedOutput }: { hasBalancedOutput: bool
       )}
       <More filled={filled}>
         <Also />
-        <FieldRow id="wish-f" question="Level you wish for" help="Usual level at the amplifier. Left empty it is 300 to 1000 mV.">
+        <FieldRow id="wish" question="Level you wish for" help="Usual level at the amplifier. Left empty it is 300 to 1000 mV.">
           <PlainBox field="wish" label="Level you wish for" />
           <PlainTrouble field="wish" />
         </FieldRow>
@@ -87,7 +87,7 @@ function Also() {
     <FieldRow id="also" question="On the same output" help="Other inputs at the same time, with their input resistance.">
       {ALSO.map(({ field, name }) => (
         <div className="alo" key={field}>
-          <label className="lab" htmlFor={field}>
+          <label className="lab" htmlFor={`${field}-box`}>
             {name}
           </label>
           <PlainBox field={field} label={`${name}, input resistance`} />

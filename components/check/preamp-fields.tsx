@@ -5,9 +5,11 @@ import { Choice, type Option } from '@/components/forms/choice'
 import { FieldRow } from '@/components/forms/field-row'
 import { TroubleLine } from '@/components/forms/trouble-line'
 import type { PreampView } from '@/lib/catalogue/views'
+import { countWord, sentenceCase } from '@/lib/setups/format'
 import { boardOfSerial, pickPreamp, serialSentence, type SerialTrouble } from '@/lib/setups/views-preamp'
 import { useCheckForm } from './form-context'
 import { PresentField } from './present-field'
+import { NO_PREAMP } from './use-check-answers'
 
 /** Which preamp, which board of it, and how its switches stand. `models` are the maker's, in the maker's order. */
 export function PreampFields({ models, serialTrouble }: { models: readonly PreampView[]; serialTrouble: SerialTrouble | null }) {
@@ -33,7 +35,7 @@ export function PreampFields({ models, serialTrouble }: { models: readonly Pream
         />
         <TroubleLine
           id="preamp-e"
-          sentence={!model && showsTrouble(['preamp']) ? 'Choose your preamp first: everything else is held against it.' : null}
+          sentence={!model && showsTrouble(['preamp']) ? NO_PREAMP : null}
           fix={null}
         />
         <noscript>
@@ -50,29 +52,29 @@ export function PreampFields({ models, serialTrouble }: { models: readonly Pream
   )
 }
 
-const upperFirst = (text: string) => text.charAt(0).toUpperCase() + text.slice(1)
-
 /** The serial number settles the board and is then forgotten: it is no part of the answers. */
 function BoardField({ model, open, trouble }: { model: PreampView; open: boolean; trouble: SerialTrouble | null }) {
   const { initial, raw, field, apply } = useCheckForm()
   const [reason, setReason] = useState(trouble)
   const boards: Option[] = [
-    ...model.boards.map(({ id, name }) => ({ value: id, label: upperFirst(name) })),
+    ...model.boards.map(({ id, name }) => ({ value: id, label: sentenceCase(name) })),
     { value: '', label: "Don't know" },
   ]
   const named = model.boards.find(({ id }) => id === raw.board)
   const newest = model.boards[model.boards.length - 1]
   return (
-    <FieldRow id="board" question="Board" help={`The ${model.name} was made with ${model.boards.length} boards, and their switches differ.`}>
+    <FieldRow id="board" question="Board" help={`The ${model.name} was made with ${countWord(model.boards.length)} boards, and their switches differ.`}>
+      <label className="lab" htmlFor="serial">
+        Serial number
+      </label>
       <div className="row">
         <span className="in">
           <input
+            id="serial"
             type="text"
             name="serial"
-            aria-label="Serial number"
             aria-describedby="serial-n serial-e"
             aria-invalid={reason !== null || undefined}
-            placeholder="Serial number"
             autoComplete="off"
             onChange={(event) => {
               const settled = boardOfSerial(model, event.target.value)

@@ -7,6 +7,7 @@ import { Answers, answersFrom, type AnswersInput } from '@/lib/setups/schema'
 import { DEFAULT_ANSWERS, STEP_KEYS, type AnswerKey, type Step } from '@/lib/setups/terms'
 import { answersBeyond, keptAnswers } from './kept-answers'
 
+export const NO_PREAMP = 'Choose your preamp first: everything else is held against it.'
 const readAll = zodResolver(Answers)
 
 /** The one schema, held against the answers of this step only: an older slip elsewhere must not hold anyone up here. */
@@ -15,6 +16,8 @@ function resolverOf(step: Step): Resolver<AnswersInput> {
     const typed = answersFrom(values)
     const { errors } = await readAll(typed, context, options as Parameters<typeof readAll>[2])
     const own = Object.entries(errors).filter(([key]) => STEP_KEYS[step].some((each) => each === key))
+    // Every answer may be left open but this one: there is nothing to hold the others against.
+    if (step === 'preamp' && !typed.preamp) own.push(['preamp', { type: 'required', message: NO_PREAMP }])
     return own.length > 0 ? { values: {}, errors: Object.fromEntries(own) } : { values: typed, errors: {} }
   }
 }
@@ -47,7 +50,7 @@ export function useCheckAnswers(step: Step, initial: AnswersInput): CheckAnswers
   useEffect(() => {
     if (begun.current) return
     begun.current = true
-    apply(answersBeyond(initial, keptAnswers()))
+    apply(answersBeyond(step, initial, keptAnswers()))
     apply(typedAlready(STEP_KEYS[step], initial))
   }, [apply, initial, step])
 

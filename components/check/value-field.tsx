@@ -62,11 +62,11 @@ export function ValueBoxes({ field, label, beside }: { field: Field; label: stri
         />
       </div>
       <div className="row vals">
-        <UnitBox id={field} label={label} unit={view.unit} value={initial[field]} field={tie(field)} bad={isBad(field)} describedBy={describedBy} className="first" />
+        <UnitBox id={`${field}-box`} label={label} unit={view.unit} value={initial[field]} field={tie(field)} bad={isBad(field)} describedBy={describedBy} className="first" />
         <span className="lab to" aria-hidden="true">
           to
         </span>
-        <UnitBox id={to} label={`${label}, second value`} unit={view.unit} value={initial[to]} field={tie(to)} bad={isBad(to)} describedBy={describedBy} className="second" />
+        <UnitBox id={`${to}-box`} label={`${label}, second value`} unit={view.unit} value={initial[to]} field={tie(to)} bad={isBad(to)} describedBy={describedBy} className="second" />
         {beside}
       </div>
       <TroubleLine

@@ -20,12 +20,12 @@ export function Choice({
   /** What is chosen when the page arrives. */
   value: string | undefined
   field: UseFormRegisterReturn
-  /** Two in a row on a phone. */
-  wrap?: boolean
+  /** Two in a row on a phone; `three` also stands three in a row where there is more place. */
+  wrap?: boolean | 'three'
   describedBy?: string
 }) {
   return (
-    <div className={wrap ? 'seg wr' : 'seg'} role="radiogroup" aria-label={label} aria-describedby={describedBy}>
+    <div className={['seg', wrap && 'wr', wrap === 'three' && 'wr3'].filter(Boolean).join(' ')} role="radiogroup" aria-label={label} aria-describedby={describedBy}>
       {options.map((option) => (
         <label key={option.value}>
           <input type="radio" {...field} value={option.value} defaultChecked={option.value === value} />

@@ -13,7 +13,7 @@ export function FieldRow({
   children: React.ReactNode
 }) {
   return (
-    <div className={`fld ${className}`.trim()} role="group" aria-labelledby={`${id}-q`} aria-describedby={help ? `${id}-h` : undefined}>
+    <div id={id} className={`fld ${className}`.trim()} role="group" aria-labelledby={`${id}-q`} aria-describedby={help ? `${id}-h` : undefined}>
       <div>
         <div className="q" id={`${id}-q`}>
           {question}

@@ -139,7 +139,7 @@ export interface OutputView {
 
 export function outputView(answers: Answers): OutputView {
   const { cartridge } = answers
-  const { outputMillivolts: output, velocity } = cartridge
+  const { outputMillivolts: output, velocity, meaning } = cartridge
   const speed = velocity === 'per-cm' ? 'cm/s' : conditionText({ ...cartridge, meaning: 'not-said' }).replace(', not said of what', '')
   const question = `What does the leaflet mean by ${velocity === 'none' ? 'its cm/s' : speed}?`
   if (!output) return { question, understood: null, ifNotSaid: null, atReference: null }
@@ -157,7 +157,7 @@ export function outputView(answers: Answers): OutputView {
       velocity === 'none'
         ? `We work with ${working(factor)}, since no speed is stated.`
         : `If it does not say, we work with ${working(footingOf({ ...cartridge, meaning: 'not-said' }))}.`,
-    atReference: asIs || velocity === 'none' ? null : `That is ${working(factor)} at 5 cm/s peak, sideways, where we compare.`,
+    atReference: asIs || velocity === 'none' || meaning === 'not-said' ? null : `That is ${working(factor)} at 5 cm/s peak, sideways, where we compare.`,
   }
 }
 

@@ -62,14 +62,22 @@ export function soFar(raw: RawAnswers, preamp: Preamp | null): SoFarView {
 
 const isKnown = ({ origin }: Quantity) => origin !== 'typical' && origin !== 'unknown'
 
+const CARTRIDGE_OPEN = 'Now the cartridge'
+const OUTPUT_OPEN = 'Its output decides the most'
+const SHORT: Record<string, string> = {
+  [CARTRIDGE_OPEN]: 'the cartridge is still open',
+  [OUTPUT_OPEN]: 'its output is still open',
+}
+
 type Told = Pick<SoFarView, 'heading' | 'sentences'>
 
 function levelSoFar(answers: Answers, inputs: MatchInputs, { chosen }: MatchResult): Told {
   const { model, cartridge } = namesOf(inputs)
   if (!chosen || !isKnown(inputs.cartridge.outputVolts)) {
     const about = choiceOf(answers.given) === 'unknown' && !answers.cartridge.name ? 'the cartridge' : cartridge
+    const begun = answers.cartridge.name !== '' || choiceOf(answers.given) !== 'unknown'
     return {
-      heading: answers.cartridge.name || choiceOf(answers.given) !== 'unknown' ? 'Its output decides the most' : 'Now the cartridge',
+      heading: begun ? OUTPUT_OPEN : CARTRIDGE_OPEN,
       sentences: [`The ${model} is ready. What the leaflet says of ${about} narrows this down; its output in mV does most.`],
     }
   }
@@ -103,8 +111,8 @@ function roomSoFar({ next }: MatchInputs, { nextMarginDecibels, worstMarginDecib
 const TREBLE_OPEN_DECIBELS = 2
 
 function shortOf(heading: string, { chosen }: MatchResult, { cartridge }: MatchInputs): string {
-  const level = heading.replace(/^It (?:will|may) be /, (start) => (start.includes('may') ? 'perhaps ' : ''))
-  const start = `So far: ${level.charAt(0).toLowerCase()}${level.slice(1)}`
+  if (SHORT[heading]) return `So far: ${SHORT[heading]}`
+  const start = `So far: ${heading.replace('It will be ', '').replace('It may be ', 'perhaps ')}`
   if (!chosen || cartridge.type === 'moving-coil') return start
   const { low, high } = chosen.figures.at15kHzDecibels
   return `${start}. Treble ${high - low > TREBLE_OPEN_DECIBELS ? 'still open' : 'settled'}`

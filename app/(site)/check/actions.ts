@@ -1,10 +1,13 @@
 'use server'
 
 import { redirect } from 'next/navigation'
+import type { Context } from '@/lib/kernel/context'
 import { Fault } from '@/lib/kernel/errors'
+import { countFormPress } from '@/lib/server/form-press'
 import { requestContext } from '@/lib/server/request-context'
+import { addRevision } from '@/lib/setups/add-revision'
 import { saveSheet } from '@/lib/setups/save-sheet'
-import { answersFrom, toQuery } from '@/lib/setups/schema'
+import { answersFrom, toQuery, type AnswersInput } from '@/lib/setups/schema'
 import { ANSWER_KEYS } from '@/lib/setups/terms'
 import { STEP_PATHS, stepOf } from '@/lib/setups/views-steps'
 import { sentWith, wayOn } from './go-on'
@@ -15,17 +18,33 @@ export async function makeSheet(data: FormData): Promise<void> {
   const context = await requestContext()
   const path = wayOn(context, { ...sentWith(data, answers), step: 'plays-into' })
   if (path) redirect(path)
-
   const key = data.get('key')
-  let target: string
+  redirect(await pathOfSheet(context, answers, typeof key === 'string' ? key : undefined))
+}
+
+async function pathOfSheet(context: Context, answers: AnswersInput, key: string | undefined): Promise<string> {
   try {
-    const { code } = saveSheet(context, { answers, key: typeof key === 'string' ? key : undefined })
-    target = `/sheets/${code}`
+    await countFormPress(context)
+    return `/sheets/${kept(context, answers, key).code}`
   } catch (trouble) {
-    if (!(trouble instanceof Fault) || trouble.code !== 'bad_input') throw trouble
+    if (!(trouble instanceof Fault)) throw trouble
+    if (trouble.code === 'too_many') return `${STEP_PATHS['plays-into']}?${toQuery(answers)}&show=wait`
+    if (trouble.code !== 'bad_input') throw trouble
     // Only what the server alone can know is left: a preamp or a board that is no longer in the catalogue.
     const wrong = ANSWER_KEYS.find((name) => name in trouble.fields) ?? 'preamp'
-    target = `${STEP_PATHS[stepOf({ key: wrong })]}?${toQuery(answers)}&show=all`
+    return `${STEP_PATHS[stepOf({ key: wrong })]}?${toQuery(answers)}&show=all`
   }
-  redirect(target)
+}
+
+/** The next revision of the sheet whose answers were changed; without one, or where it cannot be, a sheet of its own. */
+function kept(context: Context, { sheet, ...answers }: AnswersInput, key: string | undefined): { code: string } {
+  if (sheet) {
+    try {
+      return addRevision(context, sheet, () => answers)
+    } catch (trouble) {
+      // Gone, full, or someone else's to change.
+      if (!(trouble instanceof Fault) || trouble.code === 'bad_input') throw trouble
+    }
+  }
+  return saveSheet(context, { answers, key })
 }

@@ -13,6 +13,7 @@ interface OpenedCheck {
   models: PreampView[]
   made: { query: string; view: SoFarView }
   showAll: boolean
+  mustWait: boolean
 }
 
 /** Everything a step of the check is drawn from: the answers in the address and what they come to so far. */
@@ -22,5 +23,5 @@ export async function openCheck(params: AddressParams): Promise<OpenedCheck> {
   const models = listPreamps(await requestContext())
   const { board } = pickPreamp(models, answers)
   const made = { query: toQuery(answers), view: soFar(answers, board?.preamp ?? null) }
-  return { answers, models, made, showAll: given.show === 'all' }
+  return { answers, models, made, showAll: given.show === 'all', mustWait: given.show === 'wait' }
 }
