@@ -4,6 +4,7 @@ import type { ComponentType } from 'react'
 import type { ArmCurves } from './arm-facts'
 import { ArmPlot } from './arm-plot'
 import type { PlotForm } from './geometry'
+import { PHONE_BELOW } from './geometry'
 import { LevelDiagram } from './level-diagram'
 import type { LevelPicture } from './level-facts'
 import type { LoadingPlotData } from './loading-plot'
@@ -13,7 +14,6 @@ import { NoiseLine } from './noise-line'
 import type { OverloadCurves } from './overload-facts'
 import { OverloadPlot } from './overload-plot'
 import type { Turns } from './turns-facts'
-import { joinedStretches } from './turns-facts'
 import { TurnsPlot } from './turns-plot'
 import { useContainerWidth } from './use-container-width'
 import { useTween } from './use-tween'
@@ -27,33 +27,42 @@ export type FittedPlot =
   | { kind: 'noise'; plot: NoiseLevels }
   | { kind: 'turns'; plot: Turns }
 
-/** The width of the drawing column of a sheet at 1440. */
+/** The width of the drawing column of a sheet at 1440, and on a phone of 390. */
 const LIKELY_WIDTH = 928
+const LIKELY_PHONE_WIDTH = 354
 
 /**
- * A drawing that takes the width it is given. The page arrives with one drawn at `initialWidth`; as soon as the box is
- * measured it is drawn anew. Its height is kept free beforehand, and curves follow a change of data.
+ * A drawing that takes the width it is given. The page arrives with one drawn at `initialWidth` and one in the phone
+ * form, of which the box shows the one that suits it; as soon as it is measured it is drawn anew, once, at its width.
+ * So a reader without script has a drawing to read on either. Curves follow a change of data.
  */
 export function FitPlot({ initialWidth = LIKELY_WIDTH, ...drawing }: FittedPlot & { initialWidth?: number }) {
   const { ref, width, measured } = useContainerWidth<HTMLDivElement>(initialWidth)
   return (
     <div className="fit" ref={ref} data-measured={measured ? '' : undefined}>
-      <div className={`kept ${keptHeight(drawing)}`}>
+      {measured ? (
         <Drawing drawing={drawing} width={width} />
-      </div>
+      ) : (
+        <>
+          <div className={`fit-wide ${keptHeight(drawing)}`}>
+            <Drawing drawing={drawing} width={Math.max(width, PHONE_BELOW)} />
+          </div>
+          <div className="fit-phone">
+            <Drawing drawing={drawing} width={LIKELY_PHONE_WIDTH} />
+          </div>
+        </>
+      )}
     </div>
   )
 }
 
-/** The class in `plots.css` that keeps this drawing's height free. */
+/** The class in `fit.css` that keeps free the height of the drawing to come. */
 function keptHeight(drawing: FittedPlot): string {
   switch (drawing.kind) {
     case 'loading':
       return drawing.plot.size === 'panel' ? 'kept-loading-panel' : 'kept-loading'
     case 'overload':
       return 'kept-room'
-    case 'turns':
-      return `kept-turns kept-rows-${joinedStretches(drawing.plot).length}`
     default:
       return `kept-${drawing.kind}`
   }

@@ -1,7 +1,7 @@
 import { PHONE_BELOW } from './geometry'
 
 /**
- * How tall each drawing is: on a page, on a phone, on paper. `plots.css` keeps the first two free under `.kept-…`
+ * How tall each drawing is: on a page, on a phone, on paper. `fit.css` keeps the first free under `.kept-…`
  * before the box was measured, so that nothing below moves; a test holds the two together.
  */
 export const PLOT_HEIGHTS = {
