@@ -1,6 +1,6 @@
 import type { Candidate } from './candidates'
 import { findableQuantities, type Draws } from './draws'
-import { correlation } from './judge'
+import { correlation } from './judgement'
 import type { Doubt } from './result'
 
 /** How much a figure's own spread counts beside a spread of its weight: enough to order unknowns that settle nothing. */

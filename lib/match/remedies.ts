@@ -1,6 +1,7 @@
 import type { Candidate } from './candidates'
 import type { Draws } from './draws'
-import { isMagnet, recommendedLoad, type Judgement } from './judge'
+import { isMagnet, recommendedLoad } from './judge'
+import type { Judgement } from './judgement'
 import type { FindingCode, Remedy } from './result'
 import { AT_LEAST, INSIDE } from './rules'
 
