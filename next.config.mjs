@@ -9,8 +9,9 @@ const fixedHeaders = [
 /** @type {import('next').NextConfig} */
 const config = {
   poweredByHeader: false,
-  // A native module and a logger that starts worker threads: both are required at run time, not bundled.
-  serverExternalPackages: ['better-sqlite3', 'pino'],
+  // Required at run time, not bundled: a native module, a logger that starts worker threads, and the writer of mails,
+  // which needs React's renderer as it is outside of pages.
+  serverExternalPackages: ['better-sqlite3', 'pino', '@react-email/components', '@react-email/render', 'nodemailer'],
   headers: async () => [{ source: '/:path*', headers: fixedHeaders }],
 }
 

@@ -15,3 +15,7 @@ export const TEMPLATE_NAMES = [
   'deletion-asked',
 ] as const
 export type TemplateName = (typeof TEMPLATE_NAMES)[number]
+
+/** How long the outbox remembers a mail, counted from when it was asked for. */
+export const SENT_STAYS_DAYS = 30
+export const GIVEN_UP_STAYS_DAYS = 90

@@ -79,6 +79,7 @@ function isOrigin(text: string): boolean {
   return /^https?:$/.test(protocol) && pathname === '/' && search === '' && hash === ''
 }
 
-function isLocal(address: string): boolean {
+/** Whether an address of the site can be reached from this machine alone. */
+export function isLocal(address: string): boolean {
   return ['localhost', '127.0.0.1', '[::1]'].includes(new URL(address).hostname)
 }

@@ -1,0 +1,2 @@
+/** Stands in for a marker that only a bundler reads. */
+export {}
