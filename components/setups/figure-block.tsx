@@ -7,8 +7,8 @@ interface Props {
   /** What it is on paper, where the numbers run otherwise. */
   paperLabel?: string
   heading: string
-  sentences?: readonly string[]
-  /** What stands under the sentences. */
+  paragraphs?: readonly string[]
+  /** What stands under them. */
   aside?: ReactNode
   /** Left out on paper. */
   screenOnly?: boolean
@@ -16,7 +16,7 @@ interface Props {
 }
 
 /** Words on the left that state the finding, the drawing on the right. */
-export function FigureBlock({ label, paperLabel, heading, sentences = [], aside, screenOnly = false, children }: Props) {
+export function FigureBlock({ label, paperLabel, heading, paragraphs = [], aside, screenOnly = false, children }: Props) {
   return (
     <section className={screenOnly ? 'fig no-p' : 'fig'}>
       <div className="say">
@@ -31,8 +31,8 @@ export function FigureBlock({ label, paperLabel, heading, sentences = [], aside,
           )}
         </span>
         <h2>{tied(heading)}</h2>
-        {sentences.map((sentence) => (
-          <p key={sentence}>{tied(sentence)}</p>
+        {paragraphs.map((paragraph) => (
+          <p key={paragraph}>{tied(paragraph)}</p>
         ))}
         {aside}
       </div>

@@ -20,10 +20,10 @@ import { useWhatIf } from './what-if'
 /** @param neighbours settings one step away, to say what the next gain up would do */
 export function LevelFigure({ neighbours, children }: { neighbours: readonly OtherSetting[]; children?: React.ReactNode }) {
   const { inputs, shown, trying } = useWhatIf()
-  const { heading, sentences } = levelFinding(shown, inputs, trying ? [] : neighbours)
+  const { heading, paragraphs } = levelFinding(shown, inputs, trying ? [] : neighbours)
   const plot = useMemo(() => levelPicture(shown.stages, inputs), [shown, inputs])
   return (
-    <FigureBlock label="Figure 2. Level" heading={heading} sentences={sentences}>
+    <FigureBlock label="Figure 2. Level" heading={heading} paragraphs={paragraphs}>
       <figure>
         <div className="no-p">
           <FitPlot kind="level" plot={plot} />
@@ -38,10 +38,10 @@ export function LevelFigure({ neighbours, children }: { neighbours: readonly Oth
 
 export function RoomFigure() {
   const { inputs, shown } = useWhatIf()
-  const { heading, sentences } = roomFinding(shown.evaluation, inputs)
+  const { heading, paragraphs } = roomFinding(shown.evaluation, inputs)
   const plot = useMemo(() => overloadCurves(shown), [shown])
   return (
-    <FigureBlock label="Figure 3. Room at each pitch" heading={heading} sentences={sentences} screenOnly>
+    <FigureBlock label="Figure 3. Room at each pitch" heading={heading} paragraphs={paragraphs} screenOnly>
       <figure>
         <FitPlot kind="overload" plot={plot} />
         <RoomCaption gain={gainText(shown.evaluation.setting.gainDecibels)} />
@@ -54,13 +54,13 @@ export function RoomFigure() {
 /** @param present how it is now, and its curve, where that differs from the advice */
 export function TrebleFigure({ present, presentCurve, label, children }: { present: Evaluation | null; presentCurve: Compared | null; label: string; children?: React.ReactNode }) {
   const { inputs, shown, advice, trying } = useWhatIf()
-  const { heading, sentences } = trebleFinding(shown.evaluation, trying ? null : present)
+  const { heading, paragraphs } = trebleFinding(shown.evaluation, trying ? null : present)
   const plot = useMemo(() => {
     const compare = trying ? { label: 'the advice', decibels: advice.curves.loading.nominal } : presentCurve
     return loadingPlot(shown.curves, inputs, trying ? 'trying out' : label, compare)
   }, [shown, inputs, advice, trying, presentCurve, label])
   return (
-    <FigureBlock label="Figure 4. Treble" paperLabel="Figure 3. Treble" heading={heading} sentences={sentences}>
+    <FigureBlock label="Figure 4. Treble" paperLabel="Figure 3. Treble" heading={heading} paragraphs={paragraphs}>
       <figure>
         <div className="no-p">
           <FitPlot kind="loading" plot={plot} />
@@ -75,10 +75,10 @@ export function TrebleFigure({ present, presentCurve, label, children }: { prese
 
 export function ArmFigure() {
   const { inputs, shown } = useWhatIf()
-  const { heading, sentences } = armFinding(shown.evaluation, inputs)
+  const { heading, paragraphs } = armFinding(shown.evaluation, inputs)
   const plot = useMemo(() => armCurves(shown), [shown])
   return (
-    <FigureBlock label="Figure 5. Arm and rumble" heading={heading} sentences={sentences} screenOnly>
+    <FigureBlock label="Figure 5. Arm and rumble" heading={heading} paragraphs={paragraphs} screenOnly>
       <figure>
         <FitPlot kind="arm" plot={plot} />
         <ArmCaption filterOn={plot.filterOn} compliance={inputs.cartridge.complianceMetresPerNewton} />
@@ -90,10 +90,10 @@ export function ArmFigure() {
 
 export function NoiseFigure() {
   const { inputs, shown } = useWhatIf()
-  const { heading, sentences } = noiseFinding(shown.evaluation)
+  const { heading, paragraphs } = noiseFinding(shown.evaluation)
   const plot = useMemo(() => noiseLevels(shown), [shown])
   return (
-    <FigureBlock label="Figure 6. Noise" heading={heading} sentences={sentences} screenOnly>
+    <FigureBlock label="Figure 6. Noise" heading={heading} paragraphs={paragraphs} screenOnly>
       <figure>
         <FitPlot kind="noise" plot={plot} />
         <NoiseCaption temperatureKelvin={inputs.temperatureKelvin} isRange={plot.yours.high - plot.yours.low > 0.1} />

@@ -2,6 +2,7 @@ import { LevelDiagram } from '../plots/level-diagram'
 import { LoadingPlot } from '../plots/loading-plot'
 import type { MatchInputs } from '@/lib/match/inputs'
 import type { MatchResult } from '@/lib/match/result'
+import { countWord } from '@/lib/setups/format'
 import { presentToCompare } from '@/lib/setups/sentences/headings'
 import { numberMatters } from '@/lib/setups/sentences/number-to-find'
 import { otherRows } from '@/lib/setups/sentences/others'
@@ -32,23 +33,24 @@ export function FullSheet({ advice, ...parts }: SheetParts & { advice: Outcome }
   const present = presentToCompare(match)
   const compared = presentCurve(match)
   const after = afterMovesLabel(match)
-  const remedies = match.remedies
+  const remedies = match.remedies.length > 0 && (
+    <RemediesList
+      heading={suits ? 'To go without the limit' : 'To make it fit'}
+      sentences={[...new Set(match.remedies.map((remedy) => remedySentence(remedy, inputs, alternatives)))]}
+      plugs={match.remedies.some(movesAPlug)}
+      first={!suits}
+    />
+  )
   return (
     <>
       <SheetHead {...parts} />
-      {remedies.length > 0 && (
-        <RemediesList
-          heading={suits ? 'To have more' : 'To make it fit'}
-          sentences={[...new Set(remedies.map((remedy) => remedySentence(remedy, inputs, alternatives)))]}
-          plugs={remedies.some(movesAPlug)}
-        />
-      )}
+      {!suits && remedies}
       <SwitchCard
         preamp={inputs.preamp}
         present={suits ? inputs.present : null}
         target={advice.evaluation.setting.state}
-        // What does not suit is not worth a hand at the switches.
         moves={suits ? match.moves : []}
+        instead={suits ? undefined : leastBad(match)}
         label={switchLabel(inputs)}
         code={code}
         markMoved={actions.markMoved}
@@ -75,6 +77,7 @@ export function FullSheet({ advice, ...parts }: SheetParts & { advice: Outcome }
         next={numberMatters(match.next, inputs)}
         enterPath={paths.enter}
       />
+      {suits && remedies}
       {others.all.length > 0 && <OthersTable label="Table 2. Other settings" {...others} combinations={match.combinations} />}
     </>
   )
@@ -83,6 +86,14 @@ export function FullSheet({ advice, ...parts }: SheetParts & { advice: Outcome }
 function switchLabel({ preamp }: MatchInputs): string {
   const banks = preamp.controls.filter(({ kind }) => kind === 'bank').length
   return banks === 1 ? 'Figure 1. Switches, both banks' : 'Figure 1. Switches'
+}
+
+/** What does not suit is not worth a hand at the switches. */
+function leastBad({ combinations }: MatchResult) {
+  return {
+    heading: 'Nothing to move',
+    text: combinations > 1 ? `This is the least bad of all ${countWord(combinations)} settings. The figures below are for it.` : 'Nothing here can be set.',
+  }
 }
 
 function presentCurve({ presentCurves }: MatchResult): Compared | null {

@@ -9,7 +9,7 @@ export function GateSheet(parts: SheetParts) {
   return (
     <>
       <SheetHead {...parts} />
-      {gate && <RemediesList heading="Something else" sentences={gateRemedies(gate)} plugs />}
+      {gate && <RemediesList heading="Something else" sentences={gateRemedies(gate)} plugs first />}
     </>
   )
 }

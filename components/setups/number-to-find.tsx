@@ -1,8 +1,11 @@
 import { FitPlot } from '../plots/container-plot'
+import { TurnsPlot } from '../plots/turns-plot'
 import { TurnsTable } from '../plots/turns-table'
 import type { Turns } from '../plots/turns-facts'
 import { FoundForm, type FoundFormProps } from './found-form'
 import { ScreenKey } from './figure-block'
+
+const PAPER_WIDTH = 640
 
 interface Props {
   title: string
@@ -22,7 +25,12 @@ export function NumberToFind({ title, turns, whereToRead, form }: Props) {
         <ScreenKey />
         It is somewhere in here. Each heavy line is where our advice changes.
       </p>
-      <FitPlot kind="turns" plot={turns} initialWidth={740} />
+      <div className="no-p">
+        <FitPlot kind="turns" plot={turns} initialWidth={740} />
+      </div>
+      <div className="p-only">
+        <TurnsPlot {...turns} width={PAPER_WIDTH} print />
+      </div>
       <TurnsTable {...turns} />
       <div className="how">
         <div>

@@ -2,7 +2,7 @@
 
 import { DoubtBar } from '../plots/doubt-bar'
 import { tied } from '@/lib/setups/format'
-import { doubtsHeading, holdsHeading, whatHolds, type DoubtRow } from '@/lib/setups/sentences/doubts'
+import { doubtsHeading, holdsHeading, NOTHING, whatHolds, type DoubtRow } from '@/lib/setups/sentences/doubts'
 import { FigureBlock } from './figure-block'
 import { useWhatIf } from './what-if'
 
@@ -44,7 +44,8 @@ export function DoubtsTable({ label, rows }: { label: string; rows: readonly Dou
         </thead>
         <tbody>
           {rows.map(({ unknown, name, reckonedWith, decides, share }) => (
-            <tr key={unknown}>
+            // What decides nothing needs no paper.
+            <tr key={unknown} className={decides === NOTHING ? 'no-p' : undefined}>
               <th scope="row">{name}</th>
               <td>{tied(reckonedWith)}</td>
               <td>{decides}</td>

@@ -15,7 +15,7 @@ export function OthersTable({ label, shown, all, combinations }: Props) {
   const reckoned = `We reckoned all ${countWord(combinations)}.`
   const more = all.length > shown.length
   return (
-    <FigureBlock label={label} heading={othersHeading(all)} sentences={[more ? `${reckoned} These stand for the rest.` : reckoned]} screenOnly>
+    <FigureBlock label={label} heading={othersHeading(all)} paragraphs={[more ? `${reckoned} These stand for the rest.` : reckoned]} screenOnly>
       <div>
         <Rows caption="Other settings, and why not" rows={shown} />
         {more && (

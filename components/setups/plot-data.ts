@@ -8,7 +8,7 @@ import type { MatchInputs, NextInput, UnknownName } from '@/lib/match/inputs'
 import { LOUD_PEAK_DECIBELS } from '@/lib/match/level-stages'
 import type { Curves, LevelStage, NumberToFindNext, VerdictKind } from '@/lib/match/result'
 import { GROOVE_NOISE_DECIBELS } from '@/lib/match/rules'
-import { figureText, voltsText } from '@/lib/setups/format'
+import { figureText, rounded, voltsText } from '@/lib/setups/format'
 import { stretchWords } from '@/lib/setups/sentences/number-to-find'
 import { inDisplayUnit, UNKNOWN_WORDS } from '@/lib/setups/sentences/unknowns'
 import type { Outcome } from '@/lib/setups/views'
@@ -150,8 +150,8 @@ export function turnsOf(next: NumberToFindNext, inputs: MatchInputs): Turns {
     high,
     ticks: low > 0 ? roundTicks(min, max) : [low, high],
     stretches: next.stretches.map((stretch, i) => ({
-      from: i === 0 ? min : at(stretch.from),
-      to: i === next.stretches.length - 1 ? max : at(stretch.to),
+      from: i === 0 ? min : rounded(at(stretch.from), 2),
+      to: i === next.stretches.length - 1 ? max : rounded(at(stretch.to), 2),
       verdict: TURN_VERDICTS[stretch.verdict],
       text: stretchWords(stretch, inputs).todo,
     })),

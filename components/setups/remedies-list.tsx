@@ -6,12 +6,14 @@ interface Props {
   sentences: readonly string[]
   /** True where doing it means moving a plug. */
   plugs: boolean
+  /** True where this is what the page has to say, so that it comes right after the verdict. */
+  first?: boolean
 }
 
 /** What would do it. Where that moves a plug, its caution comes first. */
-export function RemediesList({ heading, sentences, plugs }: Props) {
+export function RemediesList({ heading, sentences, plugs, first = false }: Props) {
   return (
-    <section className="rem-w">
+    <section className={first ? 'rem-w first' : 'rem-w'}>
       {plugs && <CautionBox act="plug" />}
       <div className="fig rem">
         <div className="say">

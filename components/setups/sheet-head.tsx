@@ -22,7 +22,7 @@ export function SheetHead({ sheet, paths, address, actions, children }: Props) {
       <RevisionNotes {...sheet} model={inputs.preamp.modelName} computeAnew={actions.computeAnew} />
       <section className="ver2">
         <div>
-          <VerdictHead verdict={result.match.verdict} title={verdictTitle(facts)} lead={verdictLead(facts)} />
+          <VerdictHead verdict={result.match.verdict} title={verdictTitle(facts)} lead={verdictLead(facts)} short={asksForMoves(sheet)} />
           {children}
         </div>
         <TitleBlock rows={rows} changePath={paths.change} address={address} sharesFirst={!asksForMoves(sheet)} />
@@ -33,5 +33,5 @@ export function SheetHead({ sheet, paths, address, actions, children }: Props) {
 }
 
 function asksForMoves({ result: { match } }: SheetView): boolean {
-  return match.gate === null && match.verdict !== 'does-not-suit' && match.moves?.length !== 0
+  return match.gate === null && match.verdict !== 'does-not-suit' && match.verdict !== 'cannot-say' && match.moves?.length !== 0
 }

@@ -17,6 +17,8 @@ interface Props {
   /** Null when nobody knows how the unit stands: then the whole end state is asked for. */
   moves: Move[] | null
   label: string
+  /** Said in place of the moves, where none are worth making. */
+  instead?: { heading: string; text: string }
   /** Under the moves, such as how to bring the volume up. */
   after?: string
   code: string
@@ -31,7 +33,14 @@ interface Props {
 export function SwitchCard(props: Props) {
   const { preamp, present, target, moves, label } = props
   const act = cautionFor(moves, preamp)
-  const words = <MoveList preamp={preamp} moves={moves} target={target} />
+  const words = props.instead ? (
+    <>
+      <h2>{props.instead.heading}</h2>
+      <p>{props.instead.text}</p>
+    </>
+  ) : (
+    <MoveList preamp={preamp} moves={moves} target={target} />
+  )
   if (!act) {
     return (
       <section className="fig f1">

@@ -160,7 +160,10 @@ export function dayText(milliseconds: number): string {
 
 const UNIT_AFTER = /(\d) (?=(?:to \d|dB|m?V\b|µV|[kM]?Ω|[pn]F|µF|[mµ]?H\b|k?Hz|g\b|cm\/s|µm))/g
 
-/** The same text with numbers tied to their units, so that a line never breaks between them. */
+/** "Tarn 2", "Switch 7", "Figure 1", "No. 3": a name and its number. */
+const NAMED_NUMBER = /\b(\p{Lu}\p{Ll}+\.?) (?=\d{1,2}\b)/gu
+
+/** The same text with numbers tied to their units and names, so that a line never breaks between them. */
 export function tied(text: string): string {
-  return text.replace(UNIT_AFTER, '$1\u00a0')
+  return text.replace(UNIT_AFTER, '$1\u00a0').replace(NAMED_NUMBER, '$1\u00a0')
 }

@@ -21,7 +21,7 @@ export function whatHolds({ figures, findings, setting }: Evaluation, inputs: Ma
   const held: (Held | false)[] = [
     !open(/^(treble|capacitance|load-above)/) && {
       what: 'Treble',
-      holds: `Level within ${decibels(Math.max(figures.liftDecibels.high, -figures.fallDecibels.low, 0.1))} to 15 kHz`,
+      holds: `Flat within ${decibels(Math.max(figures.liftDecibels.high, -figures.fallDecibels.low, 0.1))} to 15 kHz`,
     },
     figures.snrWeightedDecibels.low >= GROOVE_NOISE_DECIBELS && {
       what: 'Hiss',
@@ -60,6 +60,9 @@ const DECIDES: Partial<Record<UnknownName, string>> = {
   compliance: 'the arm',
 }
 
+/** What an unknown decides that changes nothing said on the sheet. */
+export const NOTHING = 'nothing here'
+
 /** Below this share an unknown changes nothing that is said. */
 const NOTHING_SHARE = 0.02
 
@@ -85,7 +88,7 @@ export function doubtRows({ doubts, next }: MatchResult, inputs: MatchInputs): D
 }
 
 function decides({ unknown, share }: Doubt, settles: boolean): string {
-  if (share < NOTHING_SHARE && !settles) return 'nothing here'
+  if (share < NOTHING_SHARE && !settles) return NOTHING
   const what = DECIDES[unknown] ?? 'the figures'
   return settles ? `the verdict, and ${what}` : what
 }

@@ -7,7 +7,8 @@ import { namesOf } from './names'
 /** A figure's heading states what was found; the sentences under it say how much. */
 export interface Headed {
   heading: string
-  sentences: string[]
+  /** One paragraph each. */
+  paragraphs: string[]
 }
 
 /** From this much room on nothing needs to be said about it, dB. */
@@ -18,6 +19,8 @@ export interface ShownSetting {
   evaluation: Evaluation
   stages: LevelStage[]
 }
+
+const inParagraph = (...sentences: string[]) => sentences.filter(Boolean).join(' ')
 
 /** The stage with least room at worst; null where no limit is known. */
 export function tightestStage(stages: readonly LevelStage[]): LevelStage | null {
@@ -31,14 +34,15 @@ export function levelFinding({ evaluation, stages }: ShownSetting, inputs: Match
   const names = namesOf(inputs)
   const tight = tightestStage(stages)
   const room = tight?.roomDecibels
-  if (!tight || !room) return { heading: 'What comes out, stage by stage', sentences: [] }
+  if (!tight || !room) return { heading: 'What comes out, stage by stage', paragraphs: [] }
   const inPreamp = tight.key !== 'into-next'
   const place = inPreamp ? `${names.preamp} itself` : names.nextInput
   const heading =
     room.low < 0
       ? `The tight place is ${inPreamp ? 'the preamp itself' : names.next}`
       : `Loud records have ${room.low >= ROOMY_DECIBELS ? 'plenty of room' : room.low >= JUST_DECIBELS ? 'room' : 'room, just'}`
-  return { heading, sentences: [`The tightest place is ${place}.`, roomSentence(room), oneStepUp(evaluation, others), noiseUnderGroove(evaluation)].filter(Boolean) }
+  const tightest = inParagraph(`The tightest place is ${place}.`, roomSentence(room), oneStepUp(evaluation, others))
+  return { heading, paragraphs: [tightest, noiseUnderGroove(evaluation)] }
 }
 
 function roomSentence(room: { low: number; nominal: number }): string {
@@ -75,9 +79,11 @@ export function roomFinding({ figures, setting }: Evaluation, inputs: MatchInput
     const ordinary = room.low + ORDINARY_UNDER_LOUD
     return {
       heading: `It runs out around ${hertz(worstMarginHertz.nominal)}`,
-      sentences: [
-        `Loud records go over by ${decibels(room.low)} at worst.`,
-        ordinary >= 0 ? 'Ordinary records, 25 cm/s, stay clear of it.' : 'Ordinary records, 25 cm/s, reach it as well.',
+      paragraphs: [
+        inParagraph(
+          `Loud records go over by ${decibels(room.low)} at worst.`,
+          ordinary >= 0 ? 'Ordinary records, 25 cm/s, stay clear of it.' : 'Ordinary records, 25 cm/s, reach it as well.',
+        ),
       ],
     }
   }
@@ -87,11 +93,13 @@ export function roomFinding({ figures, setting }: Evaluation, inputs: MatchInput
   const over = `${decibels(atOneKilohertz.low)} above your usual level`
   return {
     heading: room.low >= JUST_DECIBELS ? 'The preamp itself has plenty' : 'The preamp itself has room, just',
-    sentences: [
-      `At least ${decibels(room.low)} on loud records.`,
-      behindTransformer
-        ? `At 1 kHz its limit lies ${over}.`
-        : `At 1 kHz it takes ${figureText({ low: takes, nominal: takes, high: takes }, 'volts')} RMS, ${over}.`,
+    paragraphs: [
+      inParagraph(
+        `At least ${decibels(room.low)} on loud records.`,
+        behindTransformer
+          ? `At 1 kHz its limit lies ${over}.`
+          : `At 1 kHz it takes ${figureText({ low: takes, nominal: takes, high: takes }, 'volts')} RMS, ${over}.`,
+      ),
     ],
   }
 }
@@ -113,7 +121,7 @@ export function trebleFinding(evaluation: Evaluation, present: Evaluation | null
   const sentences: string[] = []
   let heading: string
   if (up <= SLIGHT && down <= SLIGHT) {
-    heading = 'Level as far as it counts'
+    heading = 'Flat as far as it counts'
     sentences.push(`Within ${decibels(Math.max(up, down, 0.1))} up to 15 kHz. Nobody hears that.`)
   } else if (up >= down) {
     heading = up <= CLEAR ? `A slight lift${then}` : up <= STRONG ? `It lifts the treble${then}` : `It lifts the treble a lot${then}`
@@ -125,7 +133,7 @@ export function trebleFinding(evaluation: Evaluation, present: Evaluation | null
     sentences.push(down <= CLEAR ? 'Few people hear that.' : 'It sounds dull.')
   }
   const now = present ? nowTreble(present, up, down) : ''
-  return { heading, sentences: [...sentences, now].filter(Boolean) }
+  return { heading, paragraphs: [sentences.join(' '), now].filter(Boolean) }
 }
 
 function worstUp(worst: number, middle: number, where: string): string {
@@ -163,7 +171,8 @@ export function armFinding({ figures, setting }: Evaluation, inputs: MatchInputs
   const mass = added([arm.effectiveMassKilograms, arm.fixingsKilograms, cartridge.massKilograms])
   const grams = valueText({ ...mass, low: mass.low * 1e3, nominal: mass.nominal * 1e3, high: mass.high * 1e3 }, 'grams')
   const compliance = figureText(inMicrometres(cartridge.complianceMetresPerNewton), 'compliance')
-  return { heading, sentences: [`${grams} all told, ${compliance} at 10 Hz: ${hertzRange(at)}.`, filterSentence(at.low, setting.filter !== null, inputs, names.preamp)].filter(Boolean) }
+  const filter = filterSentence(at.low, setting.filter !== null, inputs, names.preamp)
+  return { heading, paragraphs: [inParagraph(`${grams} all told, ${compliance} at 10 Hz: ${hertzRange(at)}.`, filter)] }
 }
 
 const inMicrometres = ({ low, nominal, high }: { low: number; nominal: number; high: number }) => ({ low: low * 1e3, nominal: nominal * 1e3, high: high * 1e3 })
@@ -180,7 +189,7 @@ export function noiseFinding({ figures }: Evaluation): Headed {
   const under = figures.snrWeightedDecibels.low - GROOVE_NOISE_DECIBELS
   const heading =
     under >= 10 ? 'Quieter than any record' : under >= 3 ? 'Quieter than most records' : under >= 0 ? 'About as quiet as the groove' : 'You hear some hiss'
-  return { heading, sentences: [] }
+  return { heading, paragraphs: [] }
 }
 
 /** The figures of a sheet that have a heading, with the room at each pitch for one line on paper. */

@@ -95,23 +95,25 @@ const PRESENT_FAULTS: Partial<Record<FindingCode, string>> = {
   'double-step-up': 'on the wrong input',
 }
 
-/** What is worse as the unit stands than as advised, in a few words each; no more than three. */
+/** What is worse as the unit stands than as advised, in a few words each: the two that weigh most. */
 export function presentFaults({ inputs, result }: VerdictFacts): string[] {
   const { present, chosen } = result
   if (!present || !chosen) return []
   const names = namesOf(inputs)
   const advised = new Map(chosen.findings.map(({ code, worst }) => [code, WEIGHTS[worst]]))
-  const worse = present.findings.filter(({ code, worst }) => WEIGHTS[worst] > (advised.get(code) ?? 0))
+  const worse = present.findings
+    .filter(({ code, worst }) => WEIGHTS[worst] > (advised.get(code) ?? 0))
+    .sort((a, b) => WEIGHTS[b.worst] - WEIGHTS[a.worst])
   const words = worse.flatMap(({ code }) => PRESENT_FAULTS[code] ?? [])
   const faults = words.map((text) => text.replace('{next}', names.next).replace('{preamp}', names.preamp))
-  return [...new Set(faults)].slice(0, 3)
+  return [...new Set(faults)].slice(0, 2)
 }
 
 /** "Two switches put both right." */
 function putsRight(moves: readonly Move[], inputs: MatchInputs, faults: number): string {
   const handle = handleOf(inputs.preamp, moves.map(({ control }) => control))
   const count = countMoves(moves)
-  const what = faults === 2 ? 'both' : faults > 2 ? 'that' : 'it'
+  const what = faults === 2 ? 'both' : 'it'
   if (!handle || handle.one === 'pair of plugs') return `Other plugs put ${what} right.`
   return `${sentenceCase(counted(count, handle.one, handle.many))} ${count === 1 ? 'puts' : 'put'} ${what} right.`
 }
