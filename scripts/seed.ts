@@ -1,6 +1,6 @@
 import { migrateDatabase } from '@/db/migrate'
 import { loadDemoCatalogue } from '@/lib/catalogue/load-demo'
-import { nobodysContext } from '@/lib/server/request-context'
+import { nobodysContext } from '@/lib/server/nobodys-context'
 import { settingsOrExit } from './support/settings-or-exit'
 
 // Brings the database up to the present schema and the demo in it up to date. Safe to run at every start.

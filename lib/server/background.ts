@@ -6,7 +6,7 @@ import { sweepOutbox } from '@/lib/mail/sweep'
 import { startWorker } from '@/lib/mail/worker'
 import { env, isLocal } from './env'
 import { log } from './log'
-import { nobodysContext } from './request-context'
+import { nobodysContext } from './nobodys-context'
 
 const HOUR_MS = 60 * 60_000
 

@@ -28,7 +28,7 @@ export function POST(request: Request) {
     const { answers, save, key } = asked.data
     const reckoned = reckon(context, answers)
     if (!save) return toCheckJson(reckoned, null)
-    const { code } = keepAsSheet(context, reckoned, key)
+    const { code } = keepAsSheet(context, reckoned, { key })
     return toCheckJson(reckoned, toSheetReference(getSheet(context, code)))
   })
 }

@@ -1,6 +1,6 @@
 import { SettingsError } from '@/lib/server/env'
 import { beat } from '@/lib/server/heartbeat'
-import { nobodysContext } from '@/lib/server/request-context'
+import { nobodysContext } from '@/lib/server/nobodys-context'
 
 /** Never answered from a cache, nor while building. */
 export const dynamic = 'force-dynamic'
