@@ -1,9 +1,10 @@
 import 'server-only'
+import type { Transaction } from '@/db/client'
 import { permit } from '../access/permit'
 import type { Context } from '../kernel/context'
 import { Fault } from '../kernel/errors'
 import { reckon } from './reckon'
-import { insertRevision, revisionOf, saysTheSame, sheetByCode } from './rows'
+import { insertRevision, revisionOf, saysTheSame, sheetByCode, type SheetRow } from './rows'
 import type { AnswersInput } from './schema'
 import { fromStored } from './stored'
 
@@ -21,9 +22,15 @@ function letterAfter(letter: string): string {
  * Adds a revision to the sheet behind a code, reckoned now; earlier ones stay as they were. Where the newest one
  * says the same already, that one is it: a double press adds nothing.
  * @param change makes the answers out of those of the newest revision
+ * @param also is done in the same transaction, whether or not a revision was added
  * @throws Fault not_found, bad_input, conflict; sign_in or not_allowed where an owner keeps it
  */
-export function addRevision(context: Context, code: string, change: (answers: AnswersInput) => AnswersInput): { code: string; letter: string } {
+export function addRevision(
+  context: Context,
+  code: string,
+  change: (answers: AnswersInput) => AnswersInput,
+  also?: (tx: Transaction, sheet: SheetRow, letter: string) => void,
+): { code: string; letter: string } {
   const { db, actor, now } = context
   const before = permit(actor, 'sheet:change', sheetByCode(db, code))
   const answers = change(fromStored<AnswersInput>(revisionOf(db, before.id).answers))
@@ -32,9 +39,10 @@ export function addRevision(context: Context, code: string, change: (answers: An
     (tx) => {
       const sheet = permit(actor, 'sheet:change', sheetByCode(tx, code))
       const newest = revisionOf(tx, sheet.id)
-      if (saysTheSame(newest, reckoned)) return { code: sheet.code, letter: newest.letter }
-      const letter = letterAfter(newest.letter)
-      insertRevision(tx, sheet.id, letter, reckoned, now)
+      const same = saysTheSame(newest, reckoned)
+      const letter = same ? newest.letter : letterAfter(newest.letter)
+      if (!same) insertRevision(tx, sheet, letter, reckoned, now)
+      also?.(tx, sheet, letter)
       return { code: sheet.code, letter }
     },
     { behavior: 'immediate' },

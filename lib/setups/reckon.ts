@@ -11,6 +11,7 @@ import { toMatchInputs } from './inputs'
 import { Answers, AnswersInput, toQuery } from './schema'
 import type { Alternative } from './sentences/remedies'
 import { toStored } from './stored'
+import { SHELF_KEYS } from './terms'
 import type { SheetResult } from './views'
 
 /** Answers, checked: what the engine was given and all that a sheet keeps of what it said. */
@@ -47,7 +48,12 @@ export function readInputs(context: Reader, given: unknown): { answers: AnswersI
   if (!read.success) throw refused(read.error.issues)
   const { preamp, board } = read.data
   if (!preamp) throw refused([{ path: ['preamp'], message: 'Choose your preamp first.' }])
-  return { answers: texts.data, inputs: toMatchInputs(read.data, preampOf(context, preamp, board)) }
+  return { answers: withoutShelf(texts.data), inputs: toMatchInputs(read.data, preampOf(context, preamp, board)) }
+}
+
+/** Which unit and cartridge of a shelf it was is nobody's business who opens the sheet by its code. */
+function withoutShelf(answers: AnswersInput): AnswersInput {
+  return Object.fromEntries(Object.entries(answers).filter(([key]) => !SHELF_KEYS.some((own) => own === key)))
 }
 
 function refused(issues: readonly { path: PropertyKey[]; message: string }[]): Fault {

@@ -5,6 +5,7 @@ import { revisions, sheets } from '@/db/schema/setups'
 import type { Milliseconds } from '../kernel/clock'
 import { Fault } from '../kernel/errors'
 import { newId } from '../kernel/ids'
+import { fold, foldedWords } from '../kernel/text'
 import { ENGINE_VERSION, RULES_VERSION } from '../match/rules'
 import { readSheetCode } from './codes'
 import type { Reckoned } from './reckon'
@@ -48,10 +49,27 @@ export function revisionOf(db: Rows, sheetId: string, letter?: string): Revision
   return row
 }
 
-export function insertRevision(db: Rows, sheetId: string, letter: string, { answers, inputs, result, dataHash }: Reckoned, now: Milliseconds) {
+/** What a sheet's own row says of its newest revision. */
+export function headOf({ inputs, result }: Reckoned, letter: string, now: Milliseconds) {
+  const { modelId, modelName, boardName } = inputs.preamp
+  const cartridgeName = inputs.cartridge.name.trim()
+  const words = foldedWords(`${modelName} ${boardName} ${cartridgeName}`).join(' ')
+  return { letter, verdict: result.match.verdict, modelId, modelName, cartridgeName, words, changedAt: now }
+}
+
+/**
+ * Adds a revision and takes its head over to the sheet. Where it is about another model or another cartridge than the
+ * one before, the sheet is no longer about that unit or cartridge of its owner's.
+ */
+export function insertRevision(db: Rows, sheet: SheetRow, letter: string, reckoned: Reckoned, now: Milliseconds) {
+  const { answers, inputs, result, dataHash } = reckoned
+  const head = headOf(reckoned, letter, now)
+  const unitId = head.modelId === sheet.modelId ? sheet.unitId : null
+  const cartridgeId = fold(head.cartridgeName) === fold(sheet.cartridgeName) ? sheet.cartridgeId : null
+  db.update(sheets).set({ ...head, unitId, cartridgeId }).where(eq(sheets.id, sheet.id)).run()
   const row = {
     id: newId('rev'),
-    sheetId,
+    sheetId: sheet.id,
     letter,
     answers: JSON.stringify(answers),
     inputs: toStored(inputs),

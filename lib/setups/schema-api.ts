@@ -62,6 +62,8 @@ const WORDS: Partial<Record<AnswerKey, string>> = {
   velocity: 'Groove speed that the output was printed for, in cm/s; with "other", velocityOther says it.',
   meaning: 'What that speed means: peak or RMS, sideways or one channel.',
   complianceAt: 'How the compliance was measured.',
+  unit: 'Not used by a check.',
+  own: 'Not used by a check.',
   sheet: 'Not used by a check.',
   leaflet: 'Marks of values filled in from the catalogue.',
 }

@@ -106,6 +106,8 @@ export const WORD_KEYS = [
   'nextName',
   'nextId',
   'cableAs',
+  'unit',
+  'own',
   'leaflet',
   'sheet',
 ] as const
@@ -124,10 +126,11 @@ const withRange = (fields: readonly ValueField[]): AnswerKey[] =>
 
 /** Which answers are given on which step. `sheet` and `leaflet` travel along on all of them. */
 export const STEP_KEYS: Record<Step, readonly AnswerKey[]> = {
-  preamp: ['preamp', 'board', 'present', 'left', 'right'],
+  preamp: ['preamp', 'board', 'present', 'left', 'right', 'unit'],
   cartridge: [
     'name',
     'cart',
+    'own',
     'type',
     'other',
     'velocity',
@@ -177,8 +180,11 @@ export const STEP_KEYS: Record<Step, readonly AnswerKey[]> = {
   ],
 }
 
-/** Answers that no box shows: which entry of the catalogue a name was taken from. */
-export const ENTRY_KEYS: readonly AnswerKey[] = ['cart', 'armId', 'leadId', 'stepUpId', 'nextId']
+/** Answers that no box shows: which entry of the catalogue a name was taken from, or what of one's own it is. */
+export const ENTRY_KEYS: readonly AnswerKey[] = ['cart', 'armId', 'leadId', 'stepUpId', 'nextId', 'unit', 'own']
+
+/** Which unit and cartridge of one's own shelf a check is about. They place its sheet and are no part of what it says. */
+export const SHELF_KEYS = ['unit', 'own'] as const satisfies readonly WordKey[]
 
 /** What a choice stands at before anyone touched it; not written into links. */
 export const DEFAULT_ANSWERS: Partial<Record<AnswerKey, string>> = {
