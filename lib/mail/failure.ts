@@ -16,11 +16,20 @@ const SENTENCES: Record<string, string> = {
   ETIMEDOUT: 'The server did not answer in time.',
   ECONNECTION: 'The server closed the connection in the middle.',
   EDNS: 'The mail server’s name cannot be found.',
-  ETLS: 'The way to the server could not be encrypted.',
   ENOAUTH: 'The server offers no sign-in, and one is set.',
   EAUTH: 'The server did not accept the user and password.',
   ECONNREFUSED: 'Nothing listens at the mail server’s port.',
   ECONNRESET: 'The server closed the connection in the middle.',
+  EPIPE: 'The server closed the connection in the middle.',
+}
+
+/** The many codes of a certificate that does not hold, or of an encryption that does not come about. */
+const ENCRYPTION = /TLS|SSL|CERT|ALTNAME/
+
+function sentenceFor(codes: string[]): string {
+  if (codes.some((code) => ENCRYPTION.test(code))) return 'The way to the server could not be encrypted.'
+  const known = codes.find((code) => SENTENCES[code])
+  return known ? SENTENCES[known] : 'The mail could not be handed over.'
 }
 
 /**
@@ -42,8 +51,8 @@ export function tidyAnswer(answer: string): string {
  */
 export function failureOf(trouble: unknown): DeliveryFailure {
   const { code = '', originalCode = '', command = '', response, permanent = false, responseCode = 0 } = trouble as NodemailerError
-  const words = SENTENCES[originalCode] ?? SENTENCES[code] ?? 'The mail could not be handed over.'
-  const answer = response ? response : code ? `${words} (${originalCode || code})` : words
-  const forGood = permanent && ABOUT_THE_MAIL.has(command) && !ABOUT_US.has(responseCode)
-  return new DeliveryFailure(tidyAnswer(answer), forGood, { cause: trouble })
+  const aboutTheMail = ABOUT_THE_MAIL.has(command) && !ABOUT_US.has(responseCode)
+  const said = response ? `It said: ${response}` : `(${originalCode || code || 'no code'})`
+  const answer = aboutTheMail && response ? response : `${sentenceFor([originalCode, code])} ${said}`
+  return new DeliveryFailure(tidyAnswer(answer), permanent && aboutTheMail, { cause: trouble })
 }
