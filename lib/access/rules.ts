@@ -60,6 +60,7 @@ export const RULES = {
   'sheet:change': (who: Actor, sheet: Owned) => sheet.ownerId === null || owns(who, sheet),
   'sheet:keep': (who: Actor, sheet: Owned) => isFree(who) && sheet.ownerId === null,
   'sheet:name': owns,
+  'sheet:place': owns,
   'sheet:archive': owns,
 
   // Mail on its way out, and the local mailbox that stands in for a mail server.

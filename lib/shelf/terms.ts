@@ -23,8 +23,8 @@ export const MAX_UNITS = 100
 export const MAX_CARTRIDGES = 300
 
 /** Which of someone's sheets a list shows, and in which order. */
-export const SHEET_PLACES = ['kept', 'put-away'] as const
-export type SheetPlace = (typeof SHEET_PLACES)[number]
+export const SHEETS_SHOWN = ['kept', 'put-away'] as const
+export type SheetsShown = (typeof SHEETS_SHOWN)[number]
 export const SHEET_ORDERS = ['newest', 'number', 'cartridge', 'preamp', 'verdict'] as const
 export type SheetOrder = (typeof SHEET_ORDERS)[number]
 export const SHEETS_A_PAGE = 25

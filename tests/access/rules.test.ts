@@ -65,6 +65,7 @@ const TABLE: { [P in Permission]: [about: object | typeof SELF | undefined, allo
   'sheet:change': [[ANNS, ['the owner']], [NOBODYS, EVERYONE]],
   'sheet:keep': [[ANNS, []], [NOBODYS, SIGNED_IN]],
   'sheet:name': [[ANNS, ['the owner']], [NOBODYS, []]],
+  'sheet:place': [[ANNS, ['the owner']], [NOBODYS, []]],
   'sheet:archive': [[ANNS, ['the owner']], [NOBODYS, []]],
   'outbox:read': [[undefined, WORKSHOP]],
   'outbox:send-again': [[undefined, ['admin']]],
