@@ -7,8 +7,8 @@ import { inWords } from './words'
 const SAMPLE = {
   oldAddress: 'ann@oskerby.example',
   newAddress: 'ann.new@oskerby.example',
-  link: 'https://setup.oskerby.example/change-address?token=7t4kq9zmw2',
-  minutes: 1440,
+  link: 'https://setup.oskerby.example/change-address/old?token=7t4kq9zmw2',
+  minutes: 2880,
 }
 
 /** The new address may be a stranger's, mistyped: it is not told what the old one is. */

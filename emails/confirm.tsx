@@ -6,7 +6,7 @@ import { inWords } from './words'
 
 export const confirm: MailKind<TemplateProps['confirm']> = {
   subject: () => 'Confirm your address',
-  samples: [{ link: 'https://setup.oskerby.example/confirm-address?token=7t4kq9zmw2', minutes: 1440 }],
+  samples: [{ link: 'https://setup.oskerby.example/confirm-email?token=7t4kq9zmw2', minutes: 2880 }],
   Body: ({ link, minutes, site }) => (
     <Layout
       preview="One press, and your sheets are kept under this address."

@@ -11,7 +11,7 @@ const WORK: Record<Props['role'], string> = {
   admin: 'You would be an admin: staff who also let people in and look after the service. An admin signs in with a second factor.',
 }
 
-const LINK = 'https://setup.oskerby.example/join/invited?token=7t4kq9zmw2'
+const LINK = 'https://setup.oskerby.example/invitation?token=7t4kq9zmw2'
 
 export const invitation: MailKind<Props> = {
   subject: ({ invitedBy }) => `${invitedBy} invites you to the workshop`,

@@ -6,7 +6,7 @@ import { inWords } from './words'
 
 export const link: MailKind<TemplateProps['link']> = {
   subject: () => 'Your link to sign in',
-  samples: [{ link: 'https://setup.oskerby.example/sign-in/link?token=7t4kq9zmw2', minutes: 15 }],
+  samples: [{ link: 'https://setup.oskerby.example/link?token=7t4kq9zmw2', minutes: 20 }],
   Body: ({ link: href, minutes, site }) => (
     <Layout
       preview={`It works once, for ${inWords(minutes)}.`}

@@ -6,7 +6,7 @@ import { inWords } from './words'
 
 export const reset: MailKind<TemplateProps['reset']> = {
   subject: () => 'Choose a new password',
-  samples: [{ link: 'https://setup.oskerby.example/reset-password?token=7t4kq9zmw2', minutes: 60 }],
+  samples: [{ link: 'https://setup.oskerby.example/reset-password/new?token=7t4kq9zmw2', minutes: 60 }],
   Body: ({ link, minutes, site }) => (
     <Layout
       preview="Your password stays as it is until you choose another."

@@ -13,7 +13,10 @@ export interface RenderedMail {
 }
 
 /** Headings keep their small letters: words in capitals are spelt out by some screen readers. */
-const PLAIN = ['h1', 'h2', 'h3'].map((selector) => ({ selector, options: { uppercase: false } }))
+const PLAIN = [
+  ...['h1', 'h2', 'h3'].map((selector) => ({ selector, options: { uppercase: false } })),
+  { selector: '[data-text-format="dataTable"]', format: 'dataTable', options: { uppercaseHeaderCells: false } },
+]
 
 /**
  * Writes a mail.
