@@ -2,7 +2,9 @@ import type { Metadata, Viewport } from 'next'
 import { cookies, headers } from 'next/headers'
 import { Footer } from '@/components/shell/footer'
 import { Masthead } from '@/components/shell/masthead'
+import { can } from '@/lib/access/permit'
 import { THEME_COOKIE, toTheme } from '@/lib/appearance/terms'
+import { requestActor } from '@/lib/server/request-context'
 import './globals.css'
 
 export const metadata: Metadata = {
@@ -16,6 +18,8 @@ export default async function RootLayout({ children }: { children: React.ReactNo
   // Reading the request keeps every page from being made at build time: such a page has no nonce, and its
   // scripts are refused.
   await headers()
+  const actor = await requestActor()
+  const present = actor.kind === 'person' ? { name: actor.name, workshop: can(actor, 'workshop:enter') } : null
   const theme = toTheme((await cookies()).get(THEME_COOKIE)?.value)
   return (
     <html lang="en-GB" data-theme={theme === 'system' ? undefined : theme} suppressHydrationWarning>
@@ -23,7 +27,7 @@ export default async function RootLayout({ children }: { children: React.ReactNo
         <a className="skip" href="#main">
           Skip to content
         </a>
-        <Masthead />
+        <Masthead present={present} />
         {children}
         <Footer theme={theme} />
       </body>

@@ -1,5 +1,6 @@
 import { cookies } from 'next/headers'
 import { THEME_COOKIE, toTheme } from '@/lib/appearance/terms'
+import { pathWithin } from '@/lib/kernel/path-within'
 
 const ONE_YEAR_SECONDS = 365 * 24 * 60 * 60
 
@@ -11,12 +12,4 @@ export async function POST(request: Request) {
   if (theme === 'system') jar.delete(THEME_COOKIE)
   else jar.set(THEME_COOKIE, theme, { path: '/', maxAge: ONE_YEAR_SECONDS, sameSite: 'lax', httpOnly: true })
   return new Response(null, { status: 303, headers: { Location: pathWithin(form.get('back')) } })
-}
-
-/** A path of this site, whatever was sent: a form elsewhere must not choose where people land. */
-function pathWithin(back: unknown): string {
-  const base = 'http://here.invalid'
-  if (typeof back !== 'string' || !URL.canParse(back, base)) return '/'
-  const { origin, pathname, search } = new URL(back, base)
-  return origin === base && !pathname.startsWith('//') ? `${pathname}${search}` : '/'
 }

@@ -4,14 +4,15 @@ import { usePathname } from 'next/navigation'
 import { PlaceLink } from './place-link'
 
 const PLACES = [{ path: '/check', words: 'Check a cartridge' }]
+const WORKSHOP = { path: '/workshop', words: 'Workshop' }
 
 /** The places one can go, with the present one marked. */
-export function MainNav() {
+export function MainNav({ workshop }: { workshop: boolean }) {
   const here = usePathname()
   const marked = (path: string) => (here === path ? 'page' : here.startsWith(`${path}/`) ? 'true' : undefined)
   return (
     <nav aria-label="Main">
-      {PLACES.map(({ path, words }) => (
+      {(workshop ? [...PLACES, WORKSHOP] : PLACES).map(({ path, words }) => (
         <PlaceLink key={path} href={path} aria-current={marked(path)}>
           {words}
         </PlaceLink>

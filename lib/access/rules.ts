@@ -35,6 +35,9 @@ export const RULES = {
   'account:download': isSelf,
   'account:delete': isSelf,
 
+  // The workshop's own pages. What each shows is a permission of its own.
+  'workshop:enter': (who: Actor) => isStaff(who),
+
   // Other people's accounts. Nobody changes their own role or locks themselves out.
   'people:read': (who: Actor) => isAdmin(who),
   'people:invite': (who: Actor) => isAdmin(who),

@@ -1,10 +1,11 @@
 import 'server-only'
 import { and, desc, eq, gt, isNotNull, isNull, max } from 'drizzle-orm'
-import { oneTimeTokens, people, secondFactors, sessions } from '@/db/schema/accounts'
+import { oneTimeTokens, people, sessions } from '@/db/schema/accounts'
 import { permit } from '@/lib/access/permit'
 import type { Context } from '@/lib/kernel/context'
+import { fold } from '@/lib/kernel/text'
 import { recoveryCodesLeft } from './recovery-codes'
-import { confirmedFactor, generatorOf, openSecret, pendingFactor } from './second-factor'
+import { confirmedFactor, generatorOf, hasSecondFactor, openSecret, pendingFactor } from './second-factor'
 import { mustBeSelf } from './self'
 import { DELETION_WAITS_MS, type TokenPurpose } from './terms'
 import { readLink } from './tokens'
@@ -58,36 +59,46 @@ export function getPendingSecondFactor({ db, actor }: Context): PendingSecondFac
 /** What a link from a mail would open. Reading it uses nothing up. */
 export function getLink({ db, now }: Context, purpose: TokenPurpose, token: string): LinkView {
   const { state, row } = readLink(db, purpose, token, now)
-  return { state, email: row?.email ?? null, role: row?.role ?? null }
+  if (state !== 'open') return { state }
+  return { state, email: row.email, role: row.role }
 }
 
-/** Everyone with an account, admins and staff first. @throws Fault sign_in, not_found */
-export function listPeople({ db, actor }: Context): PersonView[] {
+/** More than this in one list is looked for by name. */
+const MOST_LISTED = 100
+
+/**
+ * Everyone with an account, admins and staff first, narrowed to those whose name or address holds a text.
+ * @returns a hundred at most, and how many more there are
+ * @throws Fault sign_in, not_found
+ */
+export function listPeople({ db, actor }: Context, { text = '' }: { text?: string } = {}): { people: PersonView[]; more: number } {
   permit(actor, 'people:read')
-  const seen = new Map(
-    db.select({ id: sessions.personId, at: max(sessions.lastSeenAt) }).from(sessions).groupBy(sessions.personId).all().map(({ id, at }) => [id, at]),
-  )
-  const withFactor = new Set(
-    db.select({ id: secondFactors.personId }).from(secondFactors).where(isNotNull(secondFactors.confirmedAt)).all().map(({ id }) => id),
-  )
-  const rank = { admin: 0, staff: 1, owner: 2 }
-  return db
+  const wanted = fold(text.trim())
+  const found = db
     .select()
     .from(people)
     .orderBy(people.name, people.id)
     .all()
-    .sort((a, b) => rank[a.role] - rank[b.role])
-    .map((person) => ({
-      id: person.id,
-      name: person.name,
-      email: person.email,
-      role: person.role,
-      disabled: person.disabledAt !== null,
-      hasSecondFactor: withFactor.has(person.id),
-      lastSeenAt: seen.get(person.id) ?? null,
-      deletesAt: deletesAt(person.deletionAskedAt),
-      self: actor.kind === 'person' && actor.id === person.id,
-    }))
+    .filter(({ name, email }) => fold(`${name} ${email}`).includes(wanted))
+    .sort((a, b) => RANK[a.role] - RANK[b.role])
+  const listed = found.slice(0, MOST_LISTED).map((person): PersonView => ({
+    id: person.id,
+    name: person.name,
+    email: person.email,
+    role: person.role,
+    disabled: person.disabledAt !== null,
+    hasSecondFactor: hasSecondFactor(db, person.id),
+    lastSeenAt: lastSeen(db, person.id),
+    deletesAt: deletesAt(person.deletionAskedAt),
+    self: actor.kind === 'person' && actor.id === person.id,
+  }))
+  return { people: listed, more: found.length - listed.length }
+}
+
+const RANK = { admin: 0, staff: 1, owner: 2 }
+
+function lastSeen(db: Context['db'], personId: string): number | null {
+  return db.select({ at: max(sessions.lastSeenAt) }).from(sessions).where(eq(sessions.personId, personId)).get()?.at ?? null
 }
 
 /** Invitations that nobody followed yet. @throws Fault sign_in, not_found */

@@ -31,6 +31,10 @@ const code = z
 export const SignInInput = z.object({ email, password: presentPassword })
 export type SignInInput = z.infer<typeof SignInInput>
 
+/** The sign-in page has one box for the address and two buttons. */
+export const EnterInput = z.discriminatedUnion('how', [SignInInput.extend({ how: z.literal('password') }), z.object({ how: z.literal('link'), email })])
+export type EnterInput = z.infer<typeof EnterInput>
+
 /** Asking for a link, and asking for a new password: an address is all it takes. */
 export const AddressInput = z.object({ email })
 export type AddressInput = z.infer<typeof AddressInput>

@@ -36,8 +36,10 @@ export function issueLink(tx: Pick<Database, 'insert'>, { purpose, email, ...res
   return { link: `${env().publicAddress}${TOKEN_PATHS[purpose]}?token=${token}`, minutes: lasts / 60_000, goodUntil: now + lasts }
 }
 
+type ReadLink = { state: 'open' | 'used' | 'expired'; row: TokenRow } | { state: 'unknown'; row?: undefined }
+
 /** What a link would open, without using it up: for the page that a link leads to. */
-export function readLink(db: Pick<Database, 'select'>, purpose: TokenPurpose, token: string, now: Milliseconds): { state: LinkState; row?: TokenRow } {
+export function readLink(db: Pick<Database, 'select'>, purpose: TokenPurpose, token: string, now: Milliseconds): ReadLink {
   const row = db
     .select()
     .from(oneTimeTokens)

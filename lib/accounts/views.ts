@@ -4,11 +4,7 @@ import type { Role, SignInWay } from './terms'
 export type LinkState = 'open' | 'used' | 'expired' | 'unknown'
 
 /** A link's page before its button is pressed. Whoever holds the link has the mail, so it may name the address. */
-export interface LinkView {
-  state: LinkState
-  email: string | null
-  role: Role | null
-}
+export type LinkView = { state: 'open'; email: string; role: Role | null } | { state: Exclude<LinkState, 'open'> }
 
 /** Someone's own account. */
 export interface AccountView {

@@ -11,6 +11,8 @@ import { requestContext } from './request-context'
 
 type Verb<Input, Result> = (context: Context, input: Input, origin: Origin) => Result | Promise<Result>
 
+type Texts = Record<string, string>
+
 /** What follows when it went well: a page to go to, or words in place of the form. */
 export type Outcome = { go: string } | { words: string; shown?: string[] }
 
@@ -25,7 +27,7 @@ const SECRET_FIELDS = new Set(['password', 'present', 'code', 'token'])
 export function action<Schema extends z.ZodType, Result>(
   schema: Schema,
   verb: Verb<z.output<Schema>, Result>,
-  then: (result: Result) => Outcome | Promise<Outcome>,
+  then: (result: Result, texts: Texts) => Outcome | Promise<Outcome>,
 ): FormAction {
   return async (_before, form) => {
     const texts = textsOf(form)
@@ -33,7 +35,7 @@ export function action<Schema extends z.ZodType, Result>(
     try {
       const input = schema.safeParse(texts)
       if (!input.success) throw faultOfIssues(input.error)
-      outcome = await then(await verb(await requestContext(), input.data, await requestOrigin()))
+      outcome = await then(await verb(await requestContext(), input.data, await requestOrigin()), texts)
     } catch (trouble) {
       if (trouble instanceof Fault) return refusal(trouble, texts)
       throw trouble
@@ -43,11 +45,11 @@ export function action<Schema extends z.ZodType, Result>(
   }
 }
 
-function textsOf(form: FormData): Record<string, string> {
+function textsOf(form: FormData): Texts {
   return Object.fromEntries([...form].flatMap(([name, value]) => (typeof value === 'string' && !name.startsWith('$') ? [[name, value]] : [])))
 }
 
-function refusal({ message, fields }: Fault, texts: Record<string, string>): FormState {
+function refusal({ message, fields }: Fault, texts: Texts): FormState {
   const values = Object.fromEntries(Object.entries(texts).filter(([name]) => !SECRET_FIELDS.has(name)))
   return { done: false, words: Object.keys(fields).length > 0 ? null : message, fields, values }
 }

@@ -46,6 +46,7 @@ const TABLE: { [P in Permission]: [about: object | typeof SELF | undefined, allo
   'account:remove-second-factor': [[ANN, ['the owner']], [SELF, ['the owner', 'another owner', 'staff']]],
   'account:download': [[ANN, ['the owner']], [SELF, SIGNED_IN]],
   'account:delete': [[ANN, ['the owner']], [SELF, SIGNED_IN]],
+  'workshop:enter': [[undefined, WORKSHOP]],
   'people:read': [[undefined, ['admin']]],
   'people:invite': [[undefined, ['admin']]],
   'person:read': [[ANN, ['admin']], [SELF, ['admin']]],

@@ -131,7 +131,7 @@ describe('a change of role', () => {
 test('admins see everyone, themselves marked; nobody else sees anyone', async () => {
   const { as, person } = world()
   for (const who of ['ann', 'bob', 'ruth', 'iris'] as const) person(who)
-  const seen = listPeople(as('iris'))
+  const { people: seen } = listPeople(as('iris'))
   expect(seen.map(({ name, role, self, hasSecondFactor }) => [name, role, self, hasSecondFactor])).toEqual([
     ['Iris', 'admin', true, true],
     ['Ruth', 'staff', false, false],
@@ -139,6 +139,7 @@ test('admins see everyone, themselves marked; nobody else sees anyone', async ()
     ['Bob', 'owner', false, false],
   ])
   expect(JSON.stringify(seen)).not.toMatch(/hash|secret/i)
+  expect(listPeople(as('iris'), { text: ' BOB@' }).people.map(({ name }) => name)).toEqual(['Bob'])
   for (const who of ['ann', 'ruth'] as const) expect((await faultOf(() => listPeople(as(who)))).code).toBe('not_found')
 })
 

@@ -12,8 +12,8 @@ import { hashPassword } from '@/lib/accounts/passwords'
 import { getAccount, getPendingSecondFactor } from '@/lib/accounts/queries'
 import { removeSecondFactor } from '@/lib/accounts/remove-second-factor'
 import { generatorOf, openSecret, sealSecret } from '@/lib/accounts/second-factor'
+import { signInWithRecoveryCode } from '@/lib/accounts/sign-in-with-recovery-code'
 import { signInWithPassword } from '@/lib/accounts/sign-in-with-password'
-import { useRecoveryCode } from '@/lib/accounts/use-recovery-code'
 import type { Context } from '@/lib/kernel/context'
 import { faultOf } from '../support/fault'
 import { AT_HOME } from '../support/origins'
@@ -205,10 +205,10 @@ describe('signing in with one', () => {
     const here = world()
     const { recoveryCodes } = withFactor(here)
     const first = await waitingSignIn(here)
-    useRecoveryCode(first, { code: ` ${recoveryCodes[2].toUpperCase().replace('-', ' ')} ` })
+    signInWithRecoveryCode(first, { code: ` ${recoveryCodes[2].toUpperCase().replace('-', ' ')} ` })
     expect(counts(here.db, first, first.now)).toBe(true)
     const second = await waitingSignIn(here)
-    expect((await faultOf(() => useRecoveryCode(second, { code: recoveryCodes[2] }))).code).toBe('bad_input')
+    expect((await faultOf(() => signInWithRecoveryCode(second, { code: recoveryCodes[2] }))).code).toBe('bad_input')
   })
 
   test('a closed account is not opened by a code', async () => {

@@ -8,6 +8,6 @@ import type { OpenedSession } from './sessions'
 const WRONG = 'That is none of your recovery codes, or it was used already. Each works once.'
 
 /** Finishes a sign-in with a recovery code in place of the authenticator's. @throws Fault sign_in, bad_input, too_many, not_allowed */
-export function useRecoveryCode(context: Context, { code }: RecoveryCodeInput): OpenedSession {
+export function signInWithRecoveryCode(context: Context, { code }: RecoveryCodeInput): OpenedSession {
   return finishSignIn(context, { wrong: WRONG, prove: (tx, person) => takeRecoveryCode(tx, person.id, code, context.now) })
 }
