@@ -12,13 +12,15 @@ interface Props {
   aside?: ReactNode
   /** Left out on paper. */
   screenOnly?: boolean
+  /** Gives way on paper to a long list of moves. */
+  yields?: boolean
   children: ReactNode
 }
 
 /** Words on the left that state the finding, the drawing on the right. */
-export function FigureBlock({ label, paperLabel, heading, paragraphs = [], aside, screenOnly = false, children }: Props) {
+export function FigureBlock({ label, paperLabel, heading, paragraphs = [], aside, screenOnly = false, yields = false, children }: Props) {
   return (
-    <section className={screenOnly ? 'fig no-p' : 'fig'}>
+    <section className={screenOnly ? 'fig no-p' : yields ? 'fig yields' : 'fig'}>
       <div className="say">
         <span className="fn">
           {paperLabel ? (

@@ -60,7 +60,7 @@ export function TrebleFigure({ present, presentCurve, label, children }: { prese
     return loadingPlot(shown.curves, inputs, trying ? 'trying out' : label, compare)
   }, [shown, inputs, advice, trying, presentCurve, label])
   return (
-    <FigureBlock label="Figure 4. Treble" paperLabel="Figure 3. Treble" heading={heading} paragraphs={paragraphs}>
+    <FigureBlock label="Figure 4. Treble" paperLabel="Figure 3. Treble" heading={heading} paragraphs={paragraphs} yields>
       <figure>
         <div className="no-p">
           <FitPlot kind="loading" plot={plot} />

@@ -20,6 +20,7 @@ import { canAct, neighboursOf } from './sheet-facts'
 import { SheetHead } from './sheet-head'
 import type { SheetParts } from './sheet-parts'
 import { SwitchCard } from './switch-card'
+import { FollowStrip } from './try-strip'
 
 const PAPER_WIDTH = 590
 
@@ -57,19 +58,22 @@ export function FullSheet({ advice, ...parts }: SheetParts & { advice: Outcome }
         tellPath={paths.tellPresent}
         canAct={canAct(sheet)}
       />
-      <LevelFigure neighbours={neighboursOf(match)}>
-        <div className="p-only">
-          <LevelDiagram {...levelPicture(advice.stages, inputs)} width={PAPER_WIDTH} print />
-        </div>
-      </LevelFigure>
-      <RoomFigure />
-      <TrebleFigure present={present} presentCurve={compared} label={after}>
-        <div className="p-only">
-          <LoadingPlot {...loadingPlot(advice.curves, inputs, after, compared)} width={PAPER_WIDTH} print />
-        </div>
-      </TrebleFigure>
-      <ArmFigure />
-      <NoiseFigure />
+      <div>
+        <FollowStrip />
+        <LevelFigure neighbours={neighboursOf(match)}>
+          <div className="p-only">
+            <LevelDiagram {...levelPicture(advice.stages, inputs)} width={PAPER_WIDTH} print />
+          </div>
+        </LevelFigure>
+        <RoomFigure />
+        <TrebleFigure present={present} presentCurve={compared} label={after}>
+          <div className="p-only">
+            <LoadingPlot {...loadingPlot(advice.curves, inputs, after, compared)} width={PAPER_WIDTH} print />
+          </div>
+        </TrebleFigure>
+        <ArmFigure />
+        <NoiseFigure />
+      </div>
       <PaperLine evaluation={advice.evaluation} />
       <RestsTable
         label="Table 1. What this rests on"

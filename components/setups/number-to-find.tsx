@@ -1,11 +1,8 @@
 import { FitPlot } from '../plots/container-plot'
-import { TurnsPlot } from '../plots/turns-plot'
 import { TurnsTable } from '../plots/turns-table'
-import type { Turns } from '../plots/turns-facts'
+import { joinedStretches, stretchText, TURN_WORDS, type Turns } from '../plots/turns-facts'
 import { FoundForm, type FoundFormProps } from './found-form'
 import { ScreenKey } from './figure-block'
-
-const PAPER_WIDTH = 640
 
 interface Props {
   title: string
@@ -28,9 +25,7 @@ export function NumberToFind({ title, turns, whereToRead, form }: Props) {
       <div className="no-p">
         <FitPlot kind="turns" plot={turns} initialWidth={740} />
       </div>
-      <div className="p-only">
-        <TurnsPlot {...turns} width={PAPER_WIDTH} print />
-      </div>
+      <StretchRows turns={turns} />
       <TurnsTable {...turns} />
       <div className="how">
         <div>
@@ -45,5 +40,22 @@ export function NumberToFind({ title, turns, whereToRead, form }: Props) {
         )}
       </div>
     </section>
+  )
+}
+
+/** On paper the drawing gives way to its rows, so that the sheet keeps to one page. */
+function StretchRows({ turns }: { turns: Turns }) {
+  return (
+    <table className="prn p-tab">
+      <tbody>
+        {joinedStretches(turns).map((stretch) => (
+          <tr key={stretch.from}>
+            <th scope="row">{stretchText(stretch, turns)}</th>
+            <td>{TURN_WORDS[stretch.verdict]}</td>
+            <td>{stretch.text}</td>
+          </tr>
+        ))}
+      </tbody>
+    </table>
   )
 }

@@ -13,7 +13,7 @@ interface Props {
 /** What would do it. Where that moves a plug, its caution comes first. */
 export function RemediesList({ heading, sentences, plugs, first = false }: Props) {
   return (
-    <section className={first ? 'rem-w first' : 'rem-w'}>
+    <section className={first ? 'rem-w first' : 'rem-w no-p'}>
       {plugs && <CautionBox act="plug" />}
       <div className="fig rem">
         <div className="say">

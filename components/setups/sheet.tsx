@@ -24,7 +24,7 @@ export function Sheet({ sheet, origin, actions }: Props) {
   const advice = adviceOf(sheet)
   const parts = { sheet, paths, address, actions }
   return (
-    <main id="main" className="w sheet">
+    <main id="main" className="w sheet" tabIndex={-1}>
       {!advice ? (
         <GateSheet {...parts} />
       ) : (

@@ -34,10 +34,13 @@ export function rounded(value: number, figures: number): number {
   return value === 0 ? 0 : Number(value.toPrecision(figures))
 }
 
+/** Ends nearer than this are one value with a tolerance: a resistor of ±1 % reads as one. */
+const ONE_VALUE_RATIO = 1.03
+
 /** Bounds rounded to two figures, or to three where two would make one number of both. */
 function roundedRange({ low, high }: Range, figures: number): { low: number; high: number } {
   const two = { low: rounded(low, figures), high: rounded(high, figures) }
-  return two.low === two.high && figures < 3 && high / low > 1.02
+  return two.low === two.high && figures < 3 && high / low > ONE_VALUE_RATIO
     ? { low: rounded(low, 3), high: rounded(high, 3) }
     : two
 }

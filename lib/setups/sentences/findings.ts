@@ -81,8 +81,8 @@ const figureTimes = (value: number) => (value < 9.95 ? value.toFixed(1) : value.
 
 function capacitance(side: 'low' | 'high', { range, limit, names, worst }: Told): string {
   const total = `the capacitance comes to ${figureText(range, 'farads')}`
-  if (worst === 'fine') return `${total}, inside what ${names.cartridge} asks`
   const [least, most] = side === 'high' ? [range.low - limit, range.high - limit] : [limit - range.high, limit - range.low]
+  if (worst === 'fine' || most <= 0) return `${total}, inside what ${names.cartridge} asks`
   const off = { low: Math.max(0, least), nominal: most, high: most }
   return `${total}, ${figureText(off, 'farads')} ${side === 'high' ? 'above' : 'below'} what ${names.cartridge} asks`
 }
