@@ -12,7 +12,11 @@ const config = {
   // Required at run time, not bundled: a native module, a logger that starts worker threads, and the writer of mails,
   // which needs React's renderer as it is outside of pages.
   serverExternalPackages: ['better-sqlite3', 'pino', '@react-email/components', '@react-email/render', 'nodemailer'],
-  headers: async () => [{ source: '/:path*', headers: fixedHeaders }],
+  headers: async () => [
+    { source: '/:path*', headers: fixedHeaders },
+    // Shown in a frame on our own page, and nowhere else. The later of two wins.
+    { source: '/workshop/mailbox/:id/html', headers: [{ key: 'X-Frame-Options', value: 'SAMEORIGIN' }] },
+  ],
 }
 
 export default config
