@@ -1,12 +1,12 @@
 import 'server-only'
-import { and, asc, count, desc, isNotNull, isNull, or, sql, type SQL } from 'drizzle-orm'
+import { and, asc, count, desc, isNotNull, isNull, like, or, sql, type SQL } from 'drizzle-orm'
 import { sheets } from '@/db/schema/setups'
 import { visibleTo } from '@/lib/access/visible-to'
 import type { Context } from '@/lib/kernel/context'
 import { foldedWords } from '@/lib/kernel/text'
 import { mustHaveShelf } from './owner'
 import type { SheetSearch } from './schema'
-import { SHEETS_A_PAGE, type SheetOrder } from './terms'
+import { MAX_SEARCH_WORDS, SHEETS_A_PAGE, type SheetOrder } from './terms'
 import { toSheetMark } from './to-views'
 import type { SheetsPage } from './views'
 
@@ -21,22 +21,10 @@ const ORDERS: Record<SheetOrder, SQL[]> = {
   verdict: [BY_VERDICT],
 }
 
-/** Text that a pattern takes as it stands. */
-const literally = (text: string) => text.replace(/[\\%_]/g, '\\$&')
-
-/** Every word stands in the number, the owner's name for it, or what it is about. */
+/** Every word stands in the owner's name for it or in what it is about, or is its number. Folded words hold no signs of patterns. */
 function saying(text: string): SQL | undefined {
-  const words = foldedWords(text).slice(0, 8)
-  return and(
-    ...words.map((word) => {
-      const pattern = `%${literally(word)}%`
-      return or(
-        sql`${sheets.words} like ${pattern} escape '\\'`,
-        sql`${sheets.name} like ${pattern} escape '\\'`,
-        sql`cast(${sheets.number} as text) like ${`${literally(word)}%`} escape '\\'`,
-      )
-    }),
-  )
+  const words = foldedWords(text).slice(0, MAX_SEARCH_WORDS)
+  return and(...words.map((word) => or(like(sheets.words, `%${word}%`), like(sheets.name, `%${word}%`), sql`cast(${sheets.number} as text) = ${word}`)))
 }
 
 /**

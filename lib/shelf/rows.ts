@@ -18,17 +18,20 @@ export type PositionsRow = typeof unitPositions.$inferSelect
 
 type Rows = Database | Transaction
 
+/** In the words of `permit`: what is someone else's and what never was must sound the same. */
+const NOTHING = 'There is nothing here under that name.'
+
 /** @throws Fault not_found */
 export function unitById(db: Rows, id: string): UnitRow {
   const row = db.select().from(units).where(eq(units.id, id)).get()
-  if (!row) throw new Fault('not_found', 'There is no such preamp on your shelf.')
+  if (!row) throw new Fault('not_found', NOTHING)
   return row
 }
 
 /** @throws Fault not_found */
 export function cartridgeById(db: Rows, id: string): CartridgeRow {
   const row = db.select().from(ownedCartridges).where(eq(ownedCartridges.id, id)).get()
-  if (!row) throw new Fault('not_found', 'There is no such cartridge on your shelf.')
+  if (!row) throw new Fault('not_found', NOTHING)
   return row
 }
 
@@ -39,7 +42,7 @@ export function cartridgeById(db: Rows, id: string): CartridgeRow {
  */
 export function ownSheet(db: Rows, actor: Actor, number: number): SheetRow {
   const row = db.select().from(sheets).where(and(eq(sheets.number, number), visibleTo(actor, sheets.ownerId))).get()
-  if (!row) throw new Fault('not_found', 'There is no such sheet on your shelf.')
+  if (!row) throw new Fault('not_found', NOTHING)
   return row
 }
 

@@ -29,3 +29,5 @@ export const SHEET_ORDERS = ['newest', 'number', 'cartridge', 'preamp', 'verdict
 export type SheetOrder = (typeof SHEET_ORDERS)[number]
 export const SHEETS_A_PAGE = 25
 export const MAX_SHEET_SEARCH_LENGTH = 80
+/** Words of a search beyond these are left out. */
+export const MAX_SEARCH_WORDS = 8
