@@ -1,30 +1,33 @@
 'use client'
 
-import { useEffect, useRef } from 'react'
-import { toQuery, type AnswersInput } from '@/lib/setups/schema'
+import { useEffect } from 'react'
+import { fromQuery, toQuery, type AnswersInput } from '@/lib/setups/schema'
 import { keepAnswers } from './kept-answers'
 
 /** Long enough that a word in the making is not written letter by letter, short enough to be there at a reload. */
 const SETTLED_MILLISECONDS = 200
 
-/** Keeps the address and the device in step with what was typed, right or wrong, so that nothing is lost. */
+/**
+ * Keeps the address and the device in step with what was typed, right or wrong, so that nothing is lost.
+ * Whatever leaves the page is preceded by a click, a key or a hidden page, and what is still waiting is written then:
+ * to write once the router is on its way would call it back.
+ */
 export function useAddress(answers: AnswersInput): void {
   const query = toQuery(answers)
-  const latest = useRef(answers)
   useEffect(() => {
-    latest.current = answers
-  })
-  useEffect(() => {
+    if (toQuery(fromQuery(window.location.search)) === query) return
     const write = () => {
-      if (window.location.search.slice(1) === query) return
-      keepAnswers(latest.current)
+      stop()
+      keepAnswers(fromQuery(query))
       window.history.replaceState(null, '', `${window.location.pathname}${query && `?${query}`}`)
     }
     const timer = window.setTimeout(write, SETTLED_MILLISECONDS)
-    window.addEventListener('pagehide', write)
-    return () => {
+    const leaving = ['click', 'submit', 'pagehide'] as const
+    const stop = () => {
       window.clearTimeout(timer)
-      window.removeEventListener('pagehide', write)
+      for (const event of leaving) window.removeEventListener(event, write, true)
     }
+    for (const event of leaving) window.addEventListener(event, write, true)
+    return stop
   }, [query])
 }

@@ -79,7 +79,8 @@ export function ValueBoxes({ field, label, beside }: { field: Field; label: stri
         }
       />
       <div id={ids.note}>
-        {view.understood && <p className="und vals">Understood: {view.understood}.</p>}
+        {view.understood && field !== 'output' && <p className="und vals">Understood: {view.understood}.</p>}
+        {/* An output is understood with its groove speed, and says so below. */}
         {view.fromList && <p className="note vals">As printed, from our list.</p>}
         <p className="note if-unknown">{view.ifUnknown}</p>
       </div>

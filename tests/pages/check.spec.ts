@@ -22,6 +22,7 @@ test('from the preamp to the sheet', async ({ page }) => {
   await choice(page, 'Type', 'Moving magnet').check()
   await box(page, 'Output').fill('5,4')
   await choice(page, 'Groove speed beside the output', '5 cm/s').check()
+  await box(page, 'Coil resistance').fill('700')
   await how(page, 'Inductance', "Don't know").check()
   await expect(page.getByText('We will use 400 to 550 mH, which is usual for a moving magnet of this output.')).toBeVisible()
   await next(page, 'Next: arm and cable').click()
@@ -293,8 +294,8 @@ test('what we can say so far narrows with each answer', async ({ page, isMobile 
   await box(page, 'Output').fill('5.4')
   await choice(page, 'Groove speed beside the output', '5 cm/s').check()
   await expect(soFar.getByRole('heading')).toHaveText('It will be loud enough')
-  await expect(soFar.getByText(/Settled:/)).toContainText('5.4 mV')
-  await expect(soFar.getByText(/Still open:/)).toContainText('inductance')
+  await expect(soFar.getByRole('listitem').filter({ hasText: 'Settled:' })).toContainText('5.4 mV')
+  await expect(soFar.getByRole('listitem').filter({ hasText: 'Still open:' })).toContainText('inductance')
   await expect(soFar.getByRole('img', { name: /^Treble/ })).toBeVisible()
   if (isMobile) {
     const strip = page.getByRole('link', { name: 'Show', exact: true })
