@@ -22,5 +22,7 @@ await tellTrouble(async () => {
     child.kill()
     throw trouble
   })
+  console.log('\nSign in as one of the demo:')
+  await runScript('scripts/demo-sign-ins.ts', env)
   console.log(`\nSetdown is at ${env.PUBLIC_ADDRESS}\nStop it with Ctrl-C.`)
 })
