@@ -18,7 +18,7 @@ export function PreampFields({ models, serialTrouble }: { models: readonly Pream
   const tied = field('preamp')
   return (
     <>
-      <FieldRow id="preamp" question="Model" help="It is printed on the front.">
+      <FieldRow id="preamp" question="Model" help="The name is at the back, by the output sockets.">
         <Choice
           label="Model"
           options={models.map(({ id, name }) => ({ value: id, label: name }))}

@@ -16,6 +16,7 @@ export function PreampRows({ preamps }: { preamps: PreampView[] }) {
             </em>
             <span>
               {takesInWords(preamp)}
+              <u>, </u>
               <br />
               {gainsInWords(preamp)}
             </span>
