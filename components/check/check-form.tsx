@@ -8,7 +8,6 @@ import type { PreampView } from '@/lib/catalogue/views'
 import { Answers, fromQuery, toQuery, type AnswersInput } from '@/lib/setups/schema'
 import { STEP_KEYS, type AnswerKey, type Step } from '@/lib/setups/terms'
 import { pickPreamp } from '@/lib/setups/views-preamp'
-import type { SoFarView } from '@/lib/setups/views-so-far'
 import { nextStep, readForm, STEP_NAMES, STEP_PATHS, stepBefore, stepOf } from '@/lib/setups/views-steps'
 import { CheckForm, type CheckFormContext } from './form-context'
 import { LostConnection } from './lost-connection'
@@ -19,7 +18,7 @@ import { Stepper } from './stepper'
 import { useAddress } from './use-address'
 import { useCheckAnswers } from './use-check-answers'
 import { canReachUs } from './reach'
-import { useSoFar } from './use-so-far'
+import { useSoFar, type SoFarMade } from './use-so-far'
 
 export interface CheckFormProps {
   step: Step
@@ -29,7 +28,7 @@ export interface CheckFormProps {
   /** Every preamp of the maker, with its boards. */
   models: readonly PreampView[]
   /** What the server made of the answers in the address. */
-  made: { query: string; view: SoFarView }
+  made: SoFarMade
   /** True when the server was asked to go on and could not: everything wrong is shown at once. */
   showAll: boolean
   /** True when more sheets came from here in a minute than are made. */
@@ -48,7 +47,7 @@ export function CheckFormPage({ step, heading, lead, next, models, made, showAll
   const { form, raw, apply } = useCheckAnswers(step, initial)
   useAddress(raw)
   const { model, board } = pickPreamp(models, raw)
-  const view = useSoFar(raw, board?.preamp ?? null, made)
+  const { view, meaningMatters } = useSoFar(raw, board?.preamp ?? null, made)
   const [lost, setLost] = useState(false)
   const [waiting, startWaiting] = useTransition()
   const { touchedFields, isSubmitted } = form.formState
@@ -64,7 +63,7 @@ export function CheckFormPage({ step, heading, lead, next, models, made, showAll
     field: (key) => register(key),
     showsTrouble,
     apply,
-    meaningMatters: view.meaningMatters,
+    meaningMatters,
   }
 
   const goOn = (all: AnswersInput, data: FormData) =>

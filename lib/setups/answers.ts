@@ -1,5 +1,6 @@
 import type { CartridgeType } from '../match/inputs'
-import { readField, type Given, type RawAnswers, type Trouble } from './field-reading'
+import { readField } from './field-reading'
+import type { Given, RawAnswers, Trouble } from './trouble'
 import { isFromLeaflet } from './leaflet'
 import {
   CARTRIDGE_CHOICES,

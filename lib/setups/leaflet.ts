@@ -1,15 +1,13 @@
-import type { RawAnswers } from './field-reading'
-import { VALUE_FIELDS, type AnswerKey, type NumberField, type ValueField } from './terms'
+import type { RawAnswers } from './trouble'
+import { isValueField, type AnswerKey, type NumberField } from './terms'
 
 /**
  * Values that were filled in from the catalogue and not touched since. Each leaves a short mark of what it said under
  * `leaflet`; a value that says something else by now is the owner's. This needs no script and survives a copied link.
  */
 
-const isValue = (field: NumberField): field is ValueField => (VALUE_FIELDS as readonly string[]).includes(field)
-
 function keysOf(field: NumberField): AnswerKey[] {
-  if (!isValue(field)) return [field]
+  if (!isValueField(field)) return [field]
   const keys: AnswerKey[] = [field, `${field}To`, `${field}How`]
   if (field === 'output') return [...keys, 'velocity', 'velocityOther', 'meaning']
   return field === 'compliance' ? [...keys, 'complianceAt'] : keys

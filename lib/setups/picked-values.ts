@@ -1,16 +1,15 @@
 import type { Figure, LeafletField } from '../catalogue/schema'
 import { FIELDS } from './fields'
-import { readField, type RawAnswers } from './field-reading'
+import { readField } from './field-reading'
+import type { RawAnswers } from './trouble'
 import { middle } from './reading'
-import { VALUE_FIELDS, type CartridgeChoice, type NumberField } from './terms'
+import { isValueField, type CartridgeChoice, type NumberField } from './terms'
 import { factorOf, shortNumber, unitSign } from './units'
 
 /** How a figure of the catalogue stands in the boxes of the form, so that reading them gives that figure again. */
 export type Filled = RawAnswers
 
 const close = (a: number, b: number) => a === b || Math.abs(a / b - 1) < 1e-4
-
-const hasSecondBox = (field: NumberField) => (VALUE_FIELDS as readonly string[]).includes(field)
 
 interface Ends {
   low: number
@@ -48,7 +47,7 @@ function boxes(field: NumberField, { low, nominal, high }: Ends, type: Cartridge
     if (readsAs(field, { [field]: text }, { low, nominal, high }, type)) return { [field]: text, [`${field}How`]: 'one' }
   }
   const [from, to] = [inBox(field, low, type), inBox(field, high, type)]
-  if (!hasSecondBox(field)) return { [field]: `${from} to ${to}` }
+  if (!isValueField(field)) return { [field]: `${from} to ${to}` }
   return { [field]: from, [`${field}To`]: to, [`${field}How`]: 'between' }
 }
 

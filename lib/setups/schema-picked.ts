@@ -2,7 +2,7 @@ import type { ComplianceField, Figure, LeafletField, OutputField } from '../cata
 import type { ArmView, CartridgeView, InputView, LeadView, StepUpView } from '../catalogue/views'
 import { typicalCartridge } from '../match/typical'
 import { choiceOf } from './answers'
-import type { RawAnswers } from './field-reading'
+import type { RawAnswers } from './trouble'
 import { withMarks } from './leaflet'
 import { figureAnswers, leafletAnswers, type Filled } from './picked-values'
 import type { ComplianceCondition, Meaning, NumberField, ValueField } from './terms'

@@ -1,6 +1,6 @@
 import { z } from 'zod'
 import { readAnswers, type Answers as ReadAnswers } from './answers'
-import type { RawAnswers } from './field-reading'
+import type { RawAnswers } from './trouble'
 import { ANSWER_KEYS, DEFAULT_ANSWERS, MAX_ANSWER_LENGTH, MAX_LEAFLET_LENGTH, type AnswerKey } from './terms'
 
 const limitOf = (key: AnswerKey) => (key === 'leaflet' ? MAX_LEAFLET_LENGTH : MAX_ANSWER_LENGTH)

@@ -78,6 +78,9 @@ export const PLAIN_FIELDS = [
 export type PlainField = (typeof PLAIN_FIELDS)[number]
 export type NumberField = ValueField | PlainField
 
+/** True for a value that has a second box and can be said not to be known. */
+export const isValueField = (field: NumberField): field is ValueField => VALUE_FIELDS.some((each) => each === field)
+
 /** Answers that are words, names or choices. */
 export const WORD_KEYS = [
   'preamp',

@@ -1,5 +1,5 @@
 import { boardForSerial, type BoardView, type PreampView } from '../catalogue/views'
-import type { RawAnswers } from './field-reading'
+import type { RawAnswers } from './trouble'
 
 /** The preamp that answers are about. Pure; the browser holds the maker's whole list, which is short. */
 export interface PickedPreamp {

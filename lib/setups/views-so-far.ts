@@ -5,7 +5,7 @@ import type { Quantity } from '../match/quantity'
 import type { Figures, MatchResult } from '../match/result'
 import { AT_LEAST, INSIDE } from '../match/rules'
 import { choiceOf, readAnswers, type Answers } from './answers'
-import type { RawAnswers } from './field-reading'
+import type { RawAnswers } from './trouble'
 import { footingOf } from './footing'
 import { figureText, gainText, roomText, valueText, voltsText } from './format'
 import { toMatchInputs } from './inputs'
@@ -24,8 +24,6 @@ export interface SoFarView {
   capacitance: { low: number; high: number; note: string } | null
   settled: string[]
   open: string[]
-  /** True when what the groove speed means is not said, and saying it could turn the advice. */
-  meaningMatters: boolean
 }
 
 const NOTHING: SoFarView = {
@@ -36,7 +34,6 @@ const NOTHING: SoFarView = {
   capacitance: null,
   settled: [],
   open: [],
-  meaningMatters: false,
 }
 
 export function soFar(raw: RawAnswers, preamp: Preamp | null): SoFarView {
@@ -56,8 +53,26 @@ export function soFar(raw: RawAnswers, preamp: Preamp | null): SoFarView {
     treble: trebleOf(result),
     capacitance: capacitanceOf(answers, result),
     ...lists,
-    meaningMatters: meaningMatters(answers, inputs),
   }
+}
+
+/**
+ * Whether what the groove speed means is not said, and saying it could turn the advice: tried at both ends of what it
+ * may mean. Apart from `soFar`, since it takes two more checks and is seldom asked.
+ */
+export function meaningMatters(raw: RawAnswers, preamp: Preamp | null): boolean {
+  const { answers } = readAnswers(raw)
+  const { outputMillivolts, velocity, meaning } = answers.cartridge
+  if (!preamp || !outputMillivolts || velocity === 'none' || meaning !== 'not-said') return false
+  const inputs = toMatchInputs(answers, preamp)
+  const ends = [footingOf({ ...answers.cartridge, meaning: 'peak-lateral' }), footingOf({ ...answers.cartridge, meaning: 'rms-channel' })]
+  const [most, least] = ends.map(({ nominal }) => {
+    const volts = outputMillivolts.nominal * 1e-3 * nominal
+    const outputVolts: Quantity = { low: volts, nominal: volts, high: volts, origin: 'owner' }
+    return match({ ...inputs, cartridge: { ...inputs.cartridge, outputVolts } })
+  })
+  const advice = ({ verdict, chosen }: MatchResult) => JSON.stringify([verdict, chosen?.setting.state, chosen?.worst])
+  return advice(most) !== advice(least)
 }
 
 const isKnown = ({ origin }: Quantity) => origin !== 'typical' && origin !== 'unknown'
@@ -137,20 +152,6 @@ function capacitanceOf({ cartridge }: Answers, { chosen }: MatchResult): SoFarVi
     high: tens(high),
     note: `Capacitance so far, ${figureText(chosen.figures.totalFarads, 'farads')}: arm, lead and preamp together.${asks}`,
   }
-}
-
-/** Tried at both ends of what the speed may mean: when the advice or its weight turns, it is worth asking. */
-function meaningMatters({ cartridge }: Answers, inputs: MatchInputs): boolean {
-  const { outputMillivolts, velocity, meaning } = cartridge
-  if (!outputMillivolts || velocity === 'none' || meaning !== 'not-said') return false
-  const ends = [footingOf({ ...cartridge, meaning: 'peak-lateral' }), footingOf({ ...cartridge, meaning: 'rms-channel' })]
-  const [most, least] = ends.map(({ nominal }) => {
-    const volts = outputMillivolts.nominal * 1e-3 * nominal
-    const outputVolts: Quantity = { low: volts, nominal: volts, high: volts, origin: 'owner' }
-    return match({ ...inputs, cartridge: { ...inputs.cartridge, outputVolts } })
-  })
-  const advice = ({ verdict, chosen }: MatchResult) => JSON.stringify([verdict, chosen?.setting.state, chosen?.worst])
-  return advice(most) !== advice(least)
 }
 
 function settledOf({ cartridge, arm, next }: Answers): string[] {

@@ -1,5 +1,5 @@
 import { choiceOf, readAnswers, type Answers } from './answers'
-import type { RawAnswers, Trouble } from './field-reading'
+import type { RawAnswers, Trouble } from './trouble'
 import { counted, sentenceCase } from './format'
 import { TYPE_WORDS } from './sentences/title-block'
 import { STEP_KEYS, STEPS, type CartridgeChoice, type NextKind, type Step } from './terms'

@@ -1,9 +1,10 @@
 import fc from 'fast-check'
 import { describe, expect, test } from 'vitest'
-import { readField, type RawAnswers } from '@/lib/setups/field-reading'
+import { readField } from '@/lib/setups/field-reading'
 import { parseNumber } from '@/lib/setups/numerals'
 import { readText } from '@/lib/setups/reading'
 import type { CartridgeChoice, NumberField } from '@/lib/setups/terms'
+import type { RawAnswers } from '@/lib/setups/trouble'
 import { written, writtenRange } from '@/lib/setups/units'
 
 // Ways of writing are those of leaflets and forms in several countries: common practice, no source.
