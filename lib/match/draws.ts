@@ -76,7 +76,8 @@ export function drawInputs(inputs: MatchInputs, count: number): Draws {
 
 /** The quantities in doubt that an owner could find out, with their values. */
 export function findableQuantities(inputs: MatchInputs): { name: UnknownName; quantity: Quantity }[] {
-  const own: UnknownName[] = ['maximumOutput', 'outputResistance', 'couplingCapacitor']
+  const builtIn: UnknownName[] = inputs.stepUp ? [] : ['stepUpRatio', 'stepUpPrimary', 'stepUpSecondary', 'stepUpCapacitance', 'stepUpInductance']
+  const own: UnknownName[] = ['maximumOutput', 'outputResistance', 'couplingCapacitor', ...builtIn]
   return Object.entries(quantitiesOutside(inputs))
     .map(([name, quantity]) => ({ name: name as UnknownName, quantity }))
     .filter(({ name, quantity }) => !isExact(quantity) && !own.includes(name))

@@ -85,6 +85,13 @@ describe('verdict', () => {
     next!.stretches.slice(1).forEach((stretch, k) => expect(stretch.from).toBe(next!.stretches[k].to))
   })
 
+  test('asks for nothing that is built into the preamp', () => {
+    const stepUp = { name: 'Sample', ratio: between(10, 11), primaryOhms: between(1, 3), secondaryOhms: between(200, 300), primaryHenries: between(0.5, 1), secondaryFarads: between(80e-12, 120e-12) }
+    const preamp = samplePreamp({ paths: samplePreamp().paths.map((path) => (path.id === 'mc' ? { ...path, stepUp } : path)) })
+    const { doubts } = match(withCartridge({ ...lowCoil, outputVolts: between(0.2e-3, 0.4e-3) }, { preamp }))
+    expect(doubts.map(({ unknown }) => unknown)).toEqual(['output'])
+  })
+
   test('the arm alone never rules a preamp out', () => {
     const result = match(withCartridge({ complianceMetresPerNewton: exactly(60e-3) }, { arm: { ...sampleInputs().arm, effectiveMassKilograms: exactly(40e-3) } }))
     expect(result.verdict).toBe('suits-with-a-limit')
