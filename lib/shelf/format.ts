@@ -2,7 +2,9 @@ import type { FindingCode, Gate, VerdictKind, Weight } from '../match/result'
 import type { UnknownName } from '../match/inputs'
 import { countWord, sentenceCase } from '../setups/format'
 import { UNKNOWN_WORDS } from '../setups/sentences/unknowns'
+import type { SheetSearch } from './schema'
 import type { OwnedCartridgeView, UnitView } from './views'
+import type { Compared } from './views-compare'
 
 /** Things of a shelf in the few words of a table. */
 
@@ -78,4 +80,37 @@ export function dayInYear(milliseconds: number, now: number): string {
 export function shelfHeading(units: number, cartridges: number): string {
   const preamps = units === 1 ? 'one preamp' : `${countWord(units)} preamps`
   return sentenceCase(`${preamps}, ${cartridges === 1 ? 'one cartridge' : `${countWord(cartridges)} cartridges`}`)
+}
+
+/** Longest note that stands under a cartridge's name in a table. */
+const MOST_LETTERS = 44
+
+/** What stands under a cartridge's name: its hours, and how its notes begin. */
+export function cartridgeNote(cartridge: Pick<OwnedCartridgeView, 'stylusHours' | 'notes'>): string {
+  const [line] = cartridge.notes.split('\n')
+  const short = line.length > MOST_LETTERS ? `${line.slice(0, MOST_LETTERS).replace(/\s+\S*$/, '')} ...` : line
+  return [hoursText(cartridge), short].filter(Boolean).join(', ')
+}
+
+/** "as you told us, 11 March", "after sheet 4471, B, on 12 March". */
+export function standingNote({ since, source, sheet }: NonNullable<UnitView['standing']>, now: number): string {
+  const day = dayInYear(since, now)
+  if (source === 'told') return `as you told us, ${day}`
+  return sheet ? `as sheet ${sheet.number} asked, ${day}` : `as a sheet asked, ${day}`
+}
+
+/** The address of a page of all sheets, without what stands at its default anyway. */
+export function sheetsPath({ q, show, order, page }: SheetSearch): string {
+  const query = new URLSearchParams({
+    ...(q && { q }),
+    ...(show !== 'kept' && { show }),
+    ...(order !== 'newest' && { order }),
+    ...(page > 1 && { page: String(page) }),
+  }).toString()
+  return query ? `/shelf/sheets?${query}` : '/shelf/sheets'
+}
+
+/** The address where two revisions stand side by side; each is a sheet's code and a letter. */
+export function comparePath(a: { code: string; letter: string }, b: { code: string; letter: string }, shown?: Compared): string {
+  return `/shelf/compare?a=${a.code}.${a.letter}&b=${b.code}.${b.letter}${shown ? `&as=${shown}` : ''}`
 }
