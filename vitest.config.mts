@@ -16,6 +16,9 @@ export default defineConfig({
     include: ['tests/**/*.test.{ts,tsx}'],
     exclude: ['tests/pages/**', 'node_modules/**'],
     environment: 'node',
+    // Far above what any test takes on a quiet machine: a busy one must not fail them.
+    testTimeout: 120_000,
+    hookTimeout: 120_000,
     // Settings for whatever asks for them. The folder cannot be made, so nothing opens a real database by mistake.
     env: {
       DATA_DIR: '/dev/null/setdown',
