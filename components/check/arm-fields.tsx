@@ -64,6 +64,7 @@ export function ArmFields() {
           name="leadName"
           idKey="leadId"
           label="Name of the arm lead"
+          shown
           filledNote="Found in our list. Its capacitance is filled in below."
           pickables={leads}
         />
@@ -77,6 +78,7 @@ export function ArmFields() {
               name="stepUpName"
               idKey="stepUpId"
               label="Name of the step-up"
+              shown
               filledNote="Found in our list. What is printed about it is filled in below."
               pickables={stepUps}
             />

@@ -19,6 +19,7 @@ export function LookUp<View>({
   name,
   idKey,
   label,
+  shown = false,
   filledNote,
   pickables,
 }: {
@@ -29,6 +30,8 @@ export function LookUp<View>({
   name: AnswerKey
   idKey: AnswerKey
   label: string
+  /** Whether the label stands over the box: where no question beside it says the same. */
+  shown?: boolean
   filledNote: string
   pickables: (entry: View) => Pickable[]
 }) {
@@ -39,6 +42,11 @@ export function LookUp<View>({
   const status = !settled ? '' : found.length === 0 ? 'Nothing in our list by that name.' : `${found.length} in our list.`
   return (
     <div className="lookup">
+      {shown && (
+        <label className="lab" htmlFor={`${name}-box`}>
+          {label}
+        </label>
+      )}
       <Combobox
         id={`${name}-box`}
         label={label}

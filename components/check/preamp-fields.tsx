@@ -7,17 +7,28 @@ import { TroubleLine } from '@/components/forms/trouble-line'
 import type { PreampView } from '@/lib/catalogue/views'
 import { countWord, sentenceCase } from '@/lib/setups/format'
 import { boardOfSerial, pickPreamp, serialSentence, type SerialTrouble } from '@/lib/setups/views-preamp'
+import { STEP_PATHS } from '@/lib/setups/views-steps'
+import type { UnitOffer } from '@/lib/shelf/views'
 import { useCheckForm } from './form-context'
 import { PresentField } from './present-field'
 import { NO_PREAMP } from './use-check-answers'
+import { Yours } from './yours'
 
 /** Which preamp, which board of it, and how its switches stand. `models` are the maker's, in the maker's order. */
-export function PreampFields({ models, serialTrouble }: { models: readonly PreampView[]; serialTrouble: SerialTrouble | null }) {
+export function PreampFields({ models, units, serialTrouble }: { models: readonly PreampView[]; units: readonly UnitOffer[]; serialTrouble: SerialTrouble | null }) {
   const { initial, raw, field, showsTrouble, apply } = useCheckForm()
   const { model, board, boardOpen } = pickPreamp(models, raw)
   const tied = field('preamp')
   return (
     <>
+      <Yours
+        id="yours"
+        help="From your shelf, with its board and how it stands."
+        offers={units}
+        path={STEP_PATHS.preamp}
+        chosen={raw.unit}
+        fill={(all, unit) => ({ ...all, ...unit })}
+      />
       <FieldRow id="preamp" question="Model" help="The name is at the back, by the output sockets.">
         <Choice
           label="Model"
@@ -27,7 +38,7 @@ export function PreampFields({ models, serialTrouble }: { models: readonly Pream
             ...tied,
             onChange: (event) => {
               // Boards and positions are another model's.
-              apply({ board: '', left: '', right: '', present: 'unknown' })
+              apply({ board: '', left: '', right: '', present: 'unknown', unit: '' })
               return tied.onChange(event)
             },
           }}

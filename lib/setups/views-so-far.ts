@@ -2,13 +2,14 @@ import { match } from '../match'
 import type { MatchInputs } from '../match/inputs'
 import type { Preamp } from '../match/preamp'
 import type { Quantity } from '../match/quantity'
-import type { Figures, MatchResult } from '../match/result'
-import { AT_LEAST, INSIDE } from '../match/rules'
+import type { Evaluation, Finding, MatchResult } from '../match/result'
+import { INSIDE } from '../match/rules'
 import { choiceOf, readAnswers, type Answers } from './answers'
 import type { RawAnswers } from './trouble'
 import { footingOf } from './footing'
-import { figureText, gainText, roomText, valueText, voltsText } from './format'
+import { figureText, gainText, tied, valueText, voltsText } from './format'
 import { toMatchInputs } from './inputs'
+import { findingSentence } from './sentences/findings'
 import { gateLead, gateTitle } from './sentences/gate'
 import { namesOf } from './sentences/names'
 import { TYPE_WORDS } from './sentences/title-block'
@@ -103,7 +104,8 @@ function levelSoFar(answers: Answers, inputs: MatchInputs, { chosen }: MatchResu
     inputs.preamp.gains.length > 1
       ? `${volts} with the ${model} at ${gainText(setting.gainDecibels)}, which suits best so far.`
       : `${volts} out of the ${model}.`
-  return { heading: loudness(figures.outputVolts), sentences: [gives, roomSoFar(inputs, figures)].filter(Boolean) }
+  const heading = inputs.next.kind === 'phono' ? 'Two phono stages in a row' : loudness(figures.outputVolts)
+  return { heading, sentences: [gives, against(chosen, inputs)].filter(Boolean).map(tied) }
 }
 
 function loudness({ low, high }: { low: number; high: number }): string {
@@ -114,12 +116,20 @@ function loudness({ low, high }: { low: number; high: number }): string {
   return high > most ? 'It may be too loud' : 'It will be loud enough'
 }
 
-/** Said once room is tight or over: until then level is what counts. An amplifier that is not known yet is left out. */
-function roomSoFar({ next }: MatchInputs, { nextMarginDecibels, worstMarginDecibels }: Figures): string {
-  const nextCounts = next.kind !== 'unknown' && nextMarginDecibels.low < worstMarginDecibels.low
-  const least = nextCounts ? nextMarginDecibels : worstMarginDecibels
-  if (least.low >= AT_LEAST.worstMarginDecibels.fine) return ''
-  return least.low < 0 ? `On a loud record it is ${roomText(least.low)} at worst.` : `A loud record has ${roomText(least.low)} at worst.`
+/** What the heading says already, and what an answer that is still to come may well change. */
+function isSaidOrOpen({ code }: Finding, { arm, next }: MatchInputs): boolean {
+  if (code === 'level-low' || code === 'level-high') return true
+  if (code === 'next-input-tight') return next.kind === 'unknown'
+  return (code === 'arm-resonance-low' || code === 'arm-resonance-high') && !isKnown(arm.effectiveMassKilograms)
+}
+
+/** The heaviest thing that stands against it by now; empty while there is none. */
+function against({ findings }: Evaluation, inputs: MatchInputs): string {
+  const heavy = findings.find((finding) => {
+    const counts = finding.middle === 'limit' || finding.middle === 'rules-it-out'
+    return counts && !isSaidOrOpen(finding, inputs)
+  })
+  return heavy ? findingSentence(heavy, inputs) : ''
 }
 
 /** A doubt of the treble beyond this is still open, dB at 15 kHz. */
@@ -127,13 +137,14 @@ const TREBLE_OPEN_DECIBELS = 2
 
 function shortOf(heading: string, { chosen }: MatchResult, { cartridge }: MatchInputs): string {
   if (SHORT[heading]) return `So far: ${SHORT[heading]}`
-  const start = `So far: ${heading.replace('It will be ', '').replace('It may be ', 'perhaps ')}`
+  const start = `So far: ${heading.replace('It will be ', '').replace('It may be ', 'perhaps ').replace(/^T/, 't')}`
   if (!chosen || cartridge.type === 'moving-coil') return start
   const { low, high } = chosen.figures.at15kHzDecibels
   return `${start}. Treble ${high - low > TREBLE_OPEN_DECIBELS ? 'still open' : 'settled'}`
 }
 
-const short = (values: number[]) => values.map((value) => Number(value.toFixed(2)))
+/** Two decimals are plenty on a screen and keep the page short; a rounded nothing has no sign. */
+const short = (values: number[]) => values.map((value) => Number(value.toFixed(2)) || 0)
 
 function trebleOf({ curves }: MatchResult): SoFarView['treble'] {
   if (!curves) return null
@@ -150,7 +161,7 @@ function capacitanceOf({ cartridge }: Answers, { chosen }: MatchResult): SoFarVi
   return {
     low: tens(low),
     high: tens(high),
-    note: `Capacitance so far, ${figureText(chosen.figures.totalFarads, 'farads')}: arm, lead and preamp together.${asks}`,
+    note: tied(`Capacitance so far, ${figureText(chosen.figures.totalFarads, 'farads')}: arm, lead and preamp together.${asks}`),
   }
 }
 
