@@ -32,9 +32,7 @@ export default function RepairsPage() {
           Do not open a preamp. There is nothing in it to set, and there can be mains and high voltage inside, also
           after it is off. Do not change the fuse, the adapter or the earth to get round a fault.
         </p>
-        <p>
-          House wiring is for an electrician where you are. Its rules are local, and we cannot judge it from here.
-        </p>
+        <p>House wiring is for an electrician where you are. Its rules are local, and we cannot judge it from here.</p>
       </Part>
       <Part id="workshop" title="Ask the workshop">
         <p>
@@ -47,7 +45,7 @@ export default function RepairsPage() {
         </ul>
         <p>If we ask you to send it, this goes before the plugs come out:</p>
         <CautionBox act="plug" />
-        <p>Pack it so that it cannot move, without the cartridge, and with a note of your name and address.</p>
+        <p>Pack it so that it cannot move, with a note of your name and address.</p>
       </Part>
       <Part id="rights" title="Guarantee and rights">
         <p>
@@ -55,9 +53,7 @@ export default function RepairsPage() {
           papers that came with it. This page takes nothing away from either. Nor does a sheet: it is reckoned from
           printed data, an electrical match and not a promise.
         </p>
-        <p>
-          Another workshop may repair it as well. On your sheet are the settings it needs to know.
-        </p>
+        <p>Another workshop may repair it as well. On your sheet are the settings it needs to know.</p>
       </Part>
     </main>
   )

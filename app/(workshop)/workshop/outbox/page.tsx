@@ -3,6 +3,7 @@ import { PressForm } from '@/components/forms/press-form'
 import { OutboxTable } from '@/components/mail/outbox-table'
 import { Pager } from '@/components/mail/pager'
 import { StatusLinks } from '@/components/mail/status-links'
+import { PlaceLink } from '@/components/shell/place-link'
 import { can } from '@/lib/access/permit'
 import { NONE_WORDS } from '@/lib/mail/format'
 import { listOutbox } from '@/lib/mail/queries'
@@ -25,11 +26,14 @@ export default async function OutboxPage({ searchParams }: { searchParams: Searc
   return (
     <main id="main" className="w pg post">
       <h1>Outbox</h1>
-      <p>
-        {server
-          ? `Mail goes out through ${server}. What it does not take is tried again, for four days or until its link runs out.`
-          : 'No mail server is set, so nothing goes out: every mail is kept in the mailbox here.'}
-      </p>
+      {server ? (
+        <p>Mail goes out through {server}. What it does not take is tried again, for four days or until its link runs out.</p>
+      ) : (
+        <p>
+          No mail server is set, so nothing goes out: every mail is kept{' '}
+          {can(context.actor, 'mailbox:read') ? <PlaceLink href="/workshop/mailbox">in the mailbox here</PlaceLink> : 'in the mailbox here'}.
+        </p>
+      )}
       <StatusLinks chosen={status} counts={counts} />
       {mayPress && waiting && rows.length > 1 && (
         <PressForm action={sendAllAgainAction} values={{ status }}>
