@@ -17,7 +17,7 @@ export function Masthead({ present }: { present: Present | null }) {
           <Link className="brand" href="/">
             Oskerby
           </Link>
-          <MainNav workshop={present?.workshop ?? false} />
+          <MainNav shelf={present !== null} workshop={present?.workshop ?? false} />
           <Link className="acc" href={present ? '/account' : '/sign-in'}>
             {present ? present.name : 'Sign in'}
           </Link>

@@ -1,11 +1,13 @@
 import 'server-only'
+import { eq } from 'drizzle-orm'
+import { units } from '@/db/schema/shelf'
 import { can, permit } from '../access/permit'
 import type { Context } from '../kernel/context'
 import { Fault } from '../kernel/errors'
 import type { MatchInputs } from '../match/inputs'
 import { ENGINE_VERSION, RULES_VERSION } from '../match/rules'
 import { hashOf, readInputs } from './reckon'
-import { revisionMarks, revisionOf, sheetByCode, type RevisionRow } from './rows'
+import { revisionMarks, revisionOf, sheetByCode, type RevisionRow, type SheetRow } from './rows'
 import type { AnswersInput } from './schema'
 import { fromStored } from './stored'
 import type { Changed, SheetResult, SheetView } from './views'
@@ -33,7 +35,14 @@ export function getSheet(context: Reader, code: string, letter?: string): SheetV
     engineVersion: row.engineVersion,
     changed: changedSince(context, row),
     mayChange: can(context.actor, 'sheet:change', sheet),
+    keeping: sheet.ownerId === null ? 'nobody' : can(context.actor, 'sheet:place', sheet) ? 'own' : 'someone',
+    unitName: can(context.actor, 'sheet:place', sheet) ? unitNameOf(context, sheet) : null,
   }
+}
+
+function unitNameOf({ db }: Reader, { unitId, modelName }: SheetRow): string | null {
+  const unit = unitId === null ? undefined : db.select({ name: units.name }).from(units).where(eq(units.id, unitId)).get()
+  return unit ? (unit.name ?? modelName) : null
 }
 
 function changedSince(context: Pick<Context, 'db'>, row: RevisionRow): Changed {

@@ -53,6 +53,10 @@ export interface SheetView {
   changed: Changed
   /** False where an owner keeps it and someone else looks. */
   mayChange: boolean
+  /** On the shelf of whoever looks, on nobody's, or on someone else's. */
+  keeping: 'own' | 'nobody' | 'someone'
+  /** What its owner calls the unit it is about; null for everyone else, and where it is about none. */
+  unitName: string | null
 }
 
 /** Which sheet an answer of the API belongs to. */

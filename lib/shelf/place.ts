@@ -1,5 +1,5 @@
 import 'server-only'
-import { and, eq, isNull } from 'drizzle-orm'
+import { and, isNull } from 'drizzle-orm'
 import type { Database, Transaction } from '@/db/client'
 import { ownedCartridges, units } from '@/db/schema/shelf'
 import type { Actor } from '@/lib/access/actor'

@@ -1,7 +1,7 @@
 import 'server-only'
 import { and, asc, count, desc, eq, isNotNull, isNull, sql } from 'drizzle-orm'
 import { revisions, sheets } from '@/db/schema/setups'
-import { ownedCartridges, unitPositions, units } from '@/db/schema/shelf'
+import { ownedCartridges, units } from '@/db/schema/shelf'
 import { permit } from '@/lib/access/permit'
 import { visibleTo } from '@/lib/access/visible-to'
 import type { Context } from '@/lib/kernel/context'

@@ -5,11 +5,10 @@ import type { Context } from '@/lib/kernel/context'
 import { Fault } from '@/lib/kernel/errors'
 import { countFormPress } from '@/lib/server/form-press'
 import { requestContext } from '@/lib/server/request-context'
-import { addRevision } from '@/lib/setups/add-revision'
-import { saveSheet } from '@/lib/setups/save-sheet'
 import { answersFrom, toQuery, type AnswersInput } from '@/lib/setups/schema'
 import { ANSWER_KEYS } from '@/lib/setups/terms'
 import { STEP_PATHS, stepOf } from '@/lib/setups/views-steps'
+import { keepCheck } from '@/lib/shelf/keep-check'
 import { sentWith, wayOn } from './go-on'
 
 /** Holds the whole check against its schema once more, makes the sheet and goes there; or back to what is wrong. */
@@ -25,7 +24,7 @@ export async function makeSheet(data: FormData): Promise<void> {
 async function pathOfSheet(context: Context, answers: AnswersInput, key: string | undefined): Promise<string> {
   try {
     await countFormPress(context)
-    return `/sheets/${kept(context, answers, key).code}`
+    return `/sheets/${keepCheck(context, { answers, key }).code}`
   } catch (trouble) {
     if (!(trouble instanceof Fault)) throw trouble
     if (trouble.code === 'too_many') return `${STEP_PATHS['plays-into']}?${toQuery(answers)}&show=wait`
@@ -34,17 +33,4 @@ async function pathOfSheet(context: Context, answers: AnswersInput, key: string 
     const wrong = ANSWER_KEYS.find((name) => name in trouble.fields) ?? 'preamp'
     return `${STEP_PATHS[stepOf({ key: wrong })]}?${toQuery(answers)}&show=all`
   }
-}
-
-/** The next revision of the sheet whose answers were changed; without one, or where it cannot be, a sheet of its own. */
-function kept(context: Context, { sheet, ...answers }: AnswersInput, key: string | undefined): { code: string } {
-  if (sheet) {
-    try {
-      return addRevision(context, sheet, () => answers)
-    } catch (trouble) {
-      // Gone, full, or someone else's to change.
-      if (!(trouble instanceof Fault) || trouble.code === 'bad_input') throw trouble
-    }
-  }
-  return saveSheet(context, { answers, key })
 }

@@ -4,6 +4,8 @@ import { CarryOn } from '@/components/check/carry-on'
 import { CheckFormPage } from '@/components/check/check-form'
 import { PreampFields } from '@/components/check/preamp-fields'
 import { fromQuery, toQuery } from '@/lib/setups/schema'
+import { requestContext } from '@/lib/server/request-context'
+import { unitOffers } from '@/lib/shelf/offers'
 import { openCheck, type AddressParams } from './open-check'
 
 export const metadata: Metadata = { title: 'Check a cartridge' }
@@ -23,7 +25,7 @@ export default async function PreampPage({ searchParams }: { searchParams: Addre
       send="/check/next"
     >
       {check.made.query === '' && <CarryOn />}
-      <PreampFields models={check.models} serialTrouble={serial === 'not-figures' || serial === 'no-board' ? serial : null} />
+      <PreampFields units={unitOffers(await requestContext())} models={check.models} serialTrouble={serial === 'not-figures' || serial === 'no-board' ? serial : null} />
     </CheckFormPage>
   )
 }

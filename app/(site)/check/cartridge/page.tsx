@@ -1,6 +1,9 @@
 import type { Metadata } from 'next'
 import { CartridgeFields } from '@/components/check/cartridge-fields'
 import { CheckFormPage } from '@/components/check/check-form'
+import { YourCartridges } from '@/components/check/your-cartridges'
+import { requestContext } from '@/lib/server/request-context'
+import { cartridgeOffers } from '@/lib/shelf/offers'
 import { openCheck, type AddressParams } from '../open-check'
 
 export const metadata: Metadata = { title: 'Cartridge' }
@@ -15,6 +18,7 @@ export default async function CartridgePage({ searchParams }: { searchParams: Ad
       next="Next: arm and cable"
       send="/check/next"
     >
+      <YourCartridges offers={cartridgeOffers(await requestContext())} />
       <CartridgeFields />
     </CheckFormPage>
   )
