@@ -1,22 +1,20 @@
-'use client'
-
-import { useActionState } from 'react'
 import type { UnknownName } from '@/lib/match/inputs'
 import { VELOCITIES, type Meaning, type VelocityChoice } from '@/lib/setups/terms'
 import { FieldError } from './field-error'
-import { UNTOUCHED, type SheetAction } from './sheet-actions'
 
 export interface FoundFormProps {
-  action: SheetAction
   code: string
   unknown: UnknownName
   name: string
   unit: string
   /** What is asked: the value, the value of an output with its cm/s, or only what the cm/s mean. */
   asks: 'value' | 'output' | 'meaning'
-  /** What the answers say about the cm/s already. */
+  /** What stood there when it came back, or what the answers say about the cm/s already. */
+  value?: string
   velocity?: string
   meaning?: string
+  /** Why it came back; null when it did not. */
+  trouble: string | null
 }
 
 const VELOCITY_WORDS: Record<Exclude<VelocityChoice, 'other'>, string> = {
@@ -33,20 +31,18 @@ const MEANINGS_OFFERED: readonly (readonly [Meaning, string])[] = [
   ['not-said', 'It does not say'],
 ]
 
-/** A box for the number that was found. It makes the sheet's next revision. */
-export function FoundForm({ action, code, unknown, name, unit, asks, velocity = '5', meaning = 'not-said' }: FoundFormProps) {
-  const [{ sentence, values }, act, pending] = useActionState(action, UNTOUCHED)
-  const wrong = sentence !== null
+/** A box for the number that was found. It makes the sheet's next revision. A plain form: it needs no script. */
+export function FoundForm({ code, unknown, name, unit, asks, value = '', velocity = '5', meaning = 'not-said', trouble }: FoundFormProps) {
+  const wrong = trouble !== null
   return (
-    <form action={act} className="found">
-      <input type="hidden" name="code" value={code} />
+    <form action={`/sheets/${code}/number`} method="post" className="found">
       <input type="hidden" name="unknown" value={unknown} />
       {asks !== 'meaning' && (
         <div className="row">
           <span className={wrong ? 'in bad' : 'in'}>
             <input
               name="value"
-              defaultValue={values.value ?? ''}
+              defaultValue={value}
               aria-label={unit ? `${name}, ${unit}` : name}
               aria-invalid={wrong}
               aria-describedby={wrong ? 'found-error' : undefined}
@@ -65,24 +61,19 @@ export function FoundForm({ action, code, unknown, name, unit, asks, velocity = 
             <Choice
               name="velocity"
               label="Printed for"
-              value={values.velocity ?? velocity}
+              value={velocity}
               options={VELOCITIES.filter((choice) => choice !== 'other').map((choice) => [choice, VELOCITY_WORDS[choice]])}
             />
           )}
-          <Choice
-            name="meaning"
-            label="Measured"
-            value={values.meaning ?? meaning}
-            options={MEANINGS_OFFERED}
-          />
+          <Choice name="meaning" label="Measured" value={meaning} options={MEANINGS_OFFERED} />
         </div>
       )}
+      {wrong && <FieldError id="found-error">{trouble}</FieldError>}
       <div className="row">
-        <button type="submit" className="b pri" disabled={pending}>
-          {pending ? 'One moment' : 'Work it out'}
+        <button type="submit" className="b pri">
+          Work it out
         </button>
       </div>
-      {wrong && <FieldError id="found-error">{sentence}</FieldError>}
     </form>
   )
 }

@@ -26,7 +26,7 @@ const PAPER_WIDTH = 590
 
 /** A sheet with a verdict: what to move, then every figure that speaks for it, then what it rests on. */
 export function FullSheet({ advice, ...parts }: SheetParts & { advice: Outcome }) {
-  const { sheet, paths, actions } = parts
+  const { sheet, paths } = parts
   const { inputs, result, code } = sheet
   const { match, alternatives } = result
   const suits = match.verdict !== 'does-not-suit'
@@ -54,9 +54,9 @@ export function FullSheet({ advice, ...parts }: SheetParts & { advice: Outcome }
         instead={suits ? undefined : leastBad(match)}
         label={switchLabel(inputs)}
         code={code}
-        markMoved={actions.markMoved}
         tellPath={paths.tellPresent}
         canAct={canAct(sheet)}
+        unitName={sheet.unitName}
       />
       <div>
         <FollowStrip />

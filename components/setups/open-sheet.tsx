@@ -1,6 +1,7 @@
 import { movesBetween } from '@/lib/match/moves'
 import { doubtRows } from '@/lib/setups/sentences/doubts'
 import { asksMeaning, numberTitle, whereToRead } from '@/lib/setups/sentences/number-to-find'
+import { numberTrouble } from '@/lib/setups/sentences/troubles'
 import { UNKNOWN_WORDS } from '@/lib/setups/sentences/unknowns'
 import type { Outcome } from '@/lib/setups/views'
 import type { FoundFormProps } from './found-form'
@@ -16,7 +17,7 @@ const TONIGHT = 'Bring the volume up from zero. If loud parts turn harsh, stop t
 
 /** While the verdict is open: the number that would settle it, tonight's setting, what holds, what is not known. */
 export function OpenSheet({ advice, ...parts }: SheetParts & { advice: Outcome }) {
-  const { sheet, paths, actions } = parts
+  const { sheet, paths } = parts
   const { inputs, result, code } = sheet
   const { next } = result.match
   const target = advice.evaluation.setting.state
@@ -34,9 +35,9 @@ export function OpenSheet({ advice, ...parts }: SheetParts & { advice: Outcome }
         label="Figure 1. To play it tonight"
         after={TONIGHT}
         code={code}
-        markMoved={actions.markMoved}
         tellPath={paths.tellPresent}
         canAct={canAct(sheet)}
+        unitName={sheet.unitName}
       />
       <HoldsTable label="Table 1. What can be said" />
       <DoubtsTable label="Table 2. What we do not know" rows={doubtRows(result.match, inputs)} />
@@ -45,12 +46,14 @@ export function OpenSheet({ advice, ...parts }: SheetParts & { advice: Outcome }
 }
 
 /** The box to type it in; none for what only a maker knows, nor at an earlier revision. */
-function foundForm({ sheet, actions }: SheetParts): FoundFormProps | null {
+function foundForm({ sheet, returned }: SheetParts): FoundFormProps | null {
   const { inputs, result, answers, code } = sheet
   const { next } = result.match
   if (!next || !canAct(sheet)) return null
   const words = UNKNOWN_WORDS[next.unknown]
   if (!words.field) return null
   const asks = asksMeaning(inputs, next.unknown) ? 'meaning' : next.unknown === 'output' ? 'output' : 'value'
-  return { action: actions.answerNumber, code, unknown: next.unknown, name: words.name, unit: words.unit, asks, velocity: answers.velocity, meaning: answers.meaning }
+  const { value, velocity = answers.velocity, meaning = answers.meaning } = returned ?? {}
+  const trouble = returned?.trouble === 'number' ? numberTrouble(next.unknown, value ?? '', answers) : null
+  return { code, unknown: next.unknown, name: words.name, unit: words.unit, asks, value, velocity, meaning, trouble }
 }

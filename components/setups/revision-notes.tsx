@@ -2,7 +2,6 @@ import Link from 'next/link'
 import { dayText, listed } from '@/lib/setups/format'
 import type { Changed, RevisionMark } from '@/lib/setups/views'
 import { SheetForm } from './sheet-form'
-import type { SheetAction } from './sheet-actions'
 
 interface Props {
   code: string
@@ -12,11 +11,10 @@ interface Props {
   changed: Changed
   mayChange: boolean
   model: string
-  computeAnew: SheetAction
 }
 
 /** Where this letter stands among the others, and whether it would be reckoned otherwise today. */
-export function RevisionNotes({ code, letter, createdAt, revisions, changed, mayChange, model, computeAnew }: Props) {
+export function RevisionNotes({ code, letter, createdAt, revisions, changed, mayChange, model }: Props) {
   const newest = revisions[revisions.length - 1]
   const isNewest = newest.letter === letter
   const stale = changed.rules || changed.engine || changed.data
@@ -45,7 +43,7 @@ export function RevisionNotes({ code, letter, createdAt, revisions, changed, may
             {!changed.canComputeAnew && ' It can no longer be worked out anew with these answers.'}
           </p>
           {changed.canComputeAnew && isNewest && mayChange && (
-            <SheetForm action={computeAnew} code={code} button="b sm">
+            <SheetForm act="anew" code={code} button="b sm">
               Work it out anew
             </SheetForm>
           )}
@@ -65,11 +63,8 @@ function RevisionLetter({ code, revision: { letter, createdAt }, inUse }: { code
     )
   }
   return (
-    <Link href={`/sheets/${code}?revision=${letter}`}>
-      <b>
-        {letter}
-        <span className="vh">, of {dayText(createdAt)}</span>
-      </b>
+    <Link href={`/sheets/${code}?revision=${letter}`} aria-label={`Revision ${letter}, of ${dayText(createdAt)}`}>
+      <b>{letter}</b>
     </Link>
   )
 }

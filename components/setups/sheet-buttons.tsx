@@ -36,8 +36,9 @@ export function ShareButton({ address, primary }: { address: string; primary: bo
       await navigator.share({ url: address }).catch(() => undefined)
       return
     }
-    setSaid((await copied(address)) ? 'Link copied' : '')
-    if (!navigator.clipboard) window.location.assign('#keep')
+    if (await copied(address)) setSaid('Link copied')
+    // Where copying is not allowed either, the link stands further down.
+    else document.getElementById('keep')?.scrollIntoView()
   }
   return (
     <button type="button" className={look} onClick={share}>

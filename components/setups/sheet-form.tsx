@@ -1,28 +1,24 @@
-'use client'
-
-import { useActionState, type ReactNode } from 'react'
-import { FieldError } from './field-error'
-import { UNTOUCHED, type SheetAction } from './sheet-actions'
+import type { ReactNode } from 'react'
+import type { SheetAct } from '@/lib/setups/terms-sheet'
 
 interface Props {
-  action: SheetAction
+  act: SheetAct
   code: string
-  className?: string
-  /** Class and words of its one button. */
+  /** Class of its one button. */
   button: string
   children: ReactNode
 }
 
-/** One button that does one thing to a sheet. It works before and without script. */
-export function SheetForm({ action, code, className, button, children }: Props) {
-  const [{ sentence }, act, pending] = useActionState(action, UNTOUCHED)
+/**
+ * One button that does one thing to a sheet. A plain form to its own address, so it works without script. Holding the
+ * code is what allows it: a page elsewhere that does not know the code cannot send it.
+ */
+export function SheetForm({ act, code, button, children }: Props) {
   return (
-    <form action={act} className={className}>
-      <input type="hidden" name="code" value={code} />
-      <button type="submit" className={button} disabled={pending}>
-        {pending ? 'One moment' : children}
+    <form action={`/sheets/${code}/${act}`} method="post">
+      <button type="submit" className={button}>
+        {children}
       </button>
-      {sentence && <FieldError>{sentence}</FieldError>}
     </form>
   )
 }

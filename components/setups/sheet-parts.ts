@@ -1,5 +1,5 @@
 import type { SheetView } from '@/lib/setups/views'
-import type { SheetActions } from './sheet-actions'
+import type { SheetTrouble } from '@/lib/setups/terms-sheet'
 import type { SheetPaths } from './sheet-facts'
 
 /** What every form of a sheet is made from. */
@@ -8,5 +8,13 @@ export interface SheetParts {
   paths: SheetPaths
   /** The whole link. */
   address: string
-  actions: SheetActions
+  /** Why a form of this sheet came back undone, with what stood in it; null when none did. */
+  returned: ReturnedForm | null
+}
+
+export interface ReturnedForm {
+  trouble: SheetTrouble
+  value?: string
+  velocity?: string
+  meaning?: string
 }

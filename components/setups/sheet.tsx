@@ -4,8 +4,8 @@ import { GateSheet } from './gate-sheet'
 import { KeepIt } from './keep-it'
 import { OpenSheet } from './open-sheet'
 import { PaperFoot, PROMISE } from './paper'
-import type { SheetActions } from './sheet-actions'
 import { adviceOf, pathsOf } from './sheet-facts'
+import type { ReturnedForm } from './sheet-parts'
 import { WhatIfSheet } from './what-if'
 import { WhatNext } from './what-next'
 
@@ -13,16 +13,16 @@ interface Props {
   sheet: SheetView
   /** Scheme and host of this service. */
   origin: string
-  actions: SheetActions
+  returned: ReturnedForm | null
 }
 
 /** A set-up sheet, in the order in which an owner needs it. */
-export function Sheet({ sheet, origin, actions }: Props) {
+export function Sheet({ sheet, origin, returned }: Props) {
   const { inputs, number, code, rulesVersion } = sheet
   const address = `${origin}/sheets/${code}`
   const paths = pathsOf(sheet)
   const advice = adviceOf(sheet)
-  const parts = { sheet, paths, address, actions }
+  const parts = { sheet, paths, address, returned }
   return (
     <main id="main" className="w sheet" tabIndex={-1}>
       {!advice ? (
@@ -32,7 +32,7 @@ export function Sheet({ sheet, origin, actions }: Props) {
           {sheet.result.match.verdict === 'cannot-say' ? <OpenSheet {...parts} advice={advice} /> : <FullSheet {...parts} advice={advice} />}
         </WhatIfSheet>
       )}
-      <KeepIt number={number} code={code} address={address} makeNewCode={sheet.mayChange ? actions.makeNewCode : null} />
+      <KeepIt number={number} code={code} address={address} mayChange={sheet.mayChange} keeping={sheet.keeping} />
       <WhatNext changePath={paths.change} anotherCartridgePath={paths.anotherCartridge} />
       <p className="prm no-p">
         {PROMISE} Rules, version {rulesVersion}.

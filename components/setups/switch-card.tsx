@@ -7,7 +7,6 @@ import type { ControlState, Positions } from '@/lib/match/controls'
 import type { Preamp } from '@/lib/match/preamp'
 import type { Move } from '@/lib/match/result'
 import { SheetForm } from './sheet-form'
-import type { SheetAction } from './sheet-actions'
 import { TryPanel } from './try-panel'
 
 interface Props {
@@ -22,11 +21,12 @@ interface Props {
   /** Under the moves, such as how to bring the volume up. */
   after?: string
   code: string
-  markMoved: SheetAction
   /** Where to say how they stand now. */
   tellPath: string
   /** True at the newest revision: only that one can be acted on. */
   canAct: boolean
+  /** The unit on the owner's shelf that the moves set; null where there is none. */
+  unitName: string | null
 }
 
 /** For the owner behind the preamp: the caution in view, the moves in words, the panel with what to move. */
@@ -84,13 +84,16 @@ export function SwitchCard(props: Props) {
   )
 }
 
-function Moved({ code, markMoved }: Props) {
+function Moved({ code, unitName }: Props) {
   return (
     <>
-      <SheetForm action={markMoved} code={code} button="b pri moved">
+      <SheetForm act="moved" code={code} button="b pri moved">
         I have moved them
       </SheetForm>
-      <p className="note">Starts the next revision from there. This one is kept, so you can go back.</p>
+      <p className="note">
+        Starts the next revision from there. This one is kept, so you can go back.
+        {unitName && ` Your ${unitName} then stands so on your shelf, and you can undo it there.`}
+      </p>
     </>
   )
 }
