@@ -1,3 +1,7 @@
+import { randomBytes } from 'node:crypto'
+import { mkdtempSync } from 'node:fs'
+import { tmpdir } from 'node:os'
+import { join } from 'node:path'
 import { defineConfig } from '@playwright/test'
 
 /** Debian's browser, told not to reach out for anything of its own. */
@@ -13,6 +17,11 @@ const launchOptions = {
     '--disable-sync',
   ],
 }
+
+// The server and the tests share one database and one secret. This file is read again in every worker, which finds both
+// in what it inherits.
+process.env.PAGES_DATA_DIR ??= mkdtempSync(join(tmpdir(), 'setdown-pages-'))
+process.env.PAGES_APP_SECRET ??= randomBytes(32).toString('hex')
 
 const port = 3217
 const address = `http://127.0.0.1:${port}`
@@ -35,7 +44,7 @@ export default defineConfig({
   webServer: {
     command: 'node scripts/serve-throwaway.mjs',
     url: `${address}/api/health`,
-    env: { PORT: String(port) },
+    env: { PORT: String(port), DATA_DIR: process.env.PAGES_DATA_DIR, APP_SECRET: process.env.PAGES_APP_SECRET },
     timeout: 60_000,
     reuseExistingServer: false,
     stdout: 'ignore',

@@ -37,14 +37,14 @@ export function SignInForm({ action, next, note }: Props) {
         Sign in
       </button>
       <p className="alt">
-        <b>No password, or forgotten?</b> The link opens once, and lasts twenty minutes.
+        <b>No password, or forgotten?</b> The link opens once, and lasts twenty minutes. Or{' '}
+        <Link href="/reset-password">choose a new password</Link>.
       </p>
       <button className="b" type="submit" name="how" value="link" disabled={pending}>
         Send me a link
       </button>
       <p className="alt">
-        New here? The link makes your account too. Or <Link href="/join">join with a password</Link>, or{' '}
-        <Link href="/reset-password">choose a new one</Link>.
+        New here? The link makes your account too. Or <Link href="/join">join with a password</Link>.
       </p>
     </form>
   )
