@@ -72,7 +72,13 @@ export function CheckFormPage({ step, heading, lead, next, models, made, showAll
       if (!(await canReachUs())) return setLost(true)
       const following = nextStep(step)
       if (following) return router.push(`${STEP_PATHS[following]}?${toQuery(all)}`)
-      if (typeof send === 'function') await send(data)
+      try {
+        if (typeof send === 'function') await send(data)
+      } catch (trouble) {
+        // Only a request that got no answer: going to the sheet works by throwing as well.
+        if (!(trouble instanceof TypeError)) throw trouble
+        setLost(true)
+      }
     })
 
   const elsewhere = troubles.filter((trouble) => stepOf(trouble) !== step)

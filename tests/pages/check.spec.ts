@@ -134,6 +134,18 @@ test.describe('nothing typed is lost', () => {
     expect(query(page).output).toBe('5.4')
   })
 
+  test('when the connection breaks just as the sheet is made', async ({ page }) => {
+    await page.goto(`/check/plays-into?${WHOLE}`)
+    await page.route('**/check/plays-into?**', (route) =>
+      route.request().method() === 'POST' ? route.abort('internetdisconnected') : route.continue(),
+    )
+    await next(page, 'Make the sheet').click()
+    await expect(page.getByText(/^We lost the connection\./)).toBeVisible()
+    await page.unroute('**/check/plays-into?**')
+    await page.getByRole('button', { name: 'Send again' }).click()
+    await expect(page).toHaveURL(/\/sheets\//)
+  })
+
   test('when a check is begun anew on the same device', async ({ page }) => {
     await page.goto(`/check/cartridge?${MAGNET}`)
     await box(page, 'Output').fill('5.4')
