@@ -53,6 +53,7 @@ export function UnitFields({ field, modelName, boards, begin }: Props) {
         <RadioRow
           wiring={secondHand}
           label="New or second-hand"
+          labelled
           begin={begin?.secondHand ?? 'not-said'}
           options={(['no', 'yes', 'not-said'] as const).map((each) => [each, SECOND_HAND_WORDS[each]] as const)}
         />
@@ -61,10 +62,24 @@ export function UnitFields({ field, modelName, boards, begin }: Props) {
   )
 }
 
-function RadioRow({ wiring, label, options, begin }: { wiring: FieldWiring; label: string; options: readonly (readonly [value: string, words: string])[]; begin: string }) {
+interface RadioRowProps {
+  wiring: FieldWiring
+  label: string
+  /** The label is seen as well: the question beside it says something wider. */
+  labelled?: boolean
+  options: readonly (readonly [value: string, words: string])[]
+  begin: string
+}
+
+function RadioRow({ wiring, label, labelled = false, options, begin }: RadioRowProps) {
   const chosen = wiring.value ?? begin
   return (
     <>
+      {labelled && (
+        <p className="rl" aria-hidden="true">
+          {label}
+        </p>
+      )}
       <div className="seg wr" role="radiogroup" aria-label={label}>
         {options.map(([value, words]) => (
           <label key={value}>

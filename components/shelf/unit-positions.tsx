@@ -1,5 +1,6 @@
 import type { FormAction } from '@/lib/forms/terms'
 import type { Preamp } from '@/lib/match'
+import { sentenceCase } from '@/lib/setups/format'
 import { standingNote } from '@/lib/shelf/format'
 import type { UnitView } from '@/lib/shelf/views'
 import { PositionsForm } from './positions-form'
@@ -21,7 +22,7 @@ export function UnitPositions({ unit, preamp, now, setPositions, undo }: Props) 
     <section className="two part" id="stands" aria-labelledby="stands-h">
       <div>
         <h2 id="stands-h">How it is set now</h2>
-        {standing && <p>{standingNote(standing, now)}</p>}
+        {standing && <p>{sentenceCase(standingNote(standing, now))}.</p>}
         {!board && boards.length > 1 && <p>Until you say which board it has, we take the {boards[boards.length - 1].name}.</p>}
         {lastStep && (
           <>

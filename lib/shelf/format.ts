@@ -35,19 +35,36 @@ const SHORT_FINDINGS: Record<FindingCode, string> = {
   'strapped-mono': 'mono: it may see half the load',
 }
 
+/** The same where it rules the cartridge out. */
+const RULED_OUT: Partial<Record<FindingCode, string>> = {
+  'headroom-tight': 'distorts on loud records',
+  'headroom-loud-records': 'distorts on loud records',
+  'level-low': 'too quiet',
+  'level-high': 'too loud',
+  'next-input-tight': 'too loud for the next input',
+  'load-near-coil': 'the load takes too much level',
+  hiss: 'too much hiss',
+}
+
+/** These say why it cannot be: what follows from them, such as too little level, does not. */
+const CAUSES: ReadonlySet<FindingCode> = new Set(['double-step-up', 'step-up-into-mc', 'two-phono-stages', 'magnet-into-mc'])
+
 /** What a revision's one thing worth knowing rests on. */
 export interface Gist {
   verdict: VerdictKind
   gate: Gate['reason'] | null
   next: UnknownName | null
-  finding: { code: FindingCode; worst: Weight } | null
+  /** Of the setting it shows, the heaviest first. */
+  findings: { code: FindingCode; worst: Weight }[]
 }
 
 /** The one thing worth knowing: the number to find while nothing can be said, else the heaviest finding. */
-export function worthKnowing({ verdict, gate, next, finding }: Gist): string {
+export function worthKnowing({ verdict, gate, next, findings }: Gist): string {
   if (gate) return SHORT_FINDINGS[gate]
   if (verdict === 'cannot-say') return next ? `find: ${UNKNOWN_WORDS[next].ask.replace(/^the /, '')}` : ''
-  return finding && finding.worst !== 'fine' ? SHORT_FINDINGS[finding.code] : ''
+  const first = findings.find(({ code }) => CAUSES.has(code)) ?? findings[0]
+  if (!first || first.worst === 'fine') return ''
+  return (verdict === 'does-not-suit' && first.worst === 'rules-it-out' && RULED_OUT[first.code]) || SHORT_FINDINGS[first.code]
 }
 
 /** "380 hours", "one hour", "12.5 hours"; empty where nobody counts. */
@@ -89,7 +106,7 @@ const MOST_LETTERS = 44
 export function cartridgeNote(cartridge: Pick<OwnedCartridgeView, 'stylusHours' | 'notes'>): string {
   const [line] = cartridge.notes.split('\n')
   const short = line.length > MOST_LETTERS ? `${line.slice(0, MOST_LETTERS).replace(/\s+\S*$/, '')} ...` : line
-  return [hoursText(cartridge), short].filter(Boolean).join(', ')
+  return [hoursText(cartridge), short].filter(Boolean).join('. ')
 }
 
 /** "as you told us, 11 March", "after sheet 4471, B, on 12 March". */

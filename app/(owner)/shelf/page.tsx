@@ -15,7 +15,7 @@ export default async function ShelfPage() {
   const shelf = getShelf(context)
   const { units, cartridges, sheetCount } = shelf
   return (
-    <main id="main" className="w pg">
+    <main id="main" className="w pg goes">
       <h1>My sheets</h1>
       {units.length + cartridges.length + sheetCount === 0 ? <EmptyShelf /> : <ShelfTable shelf={shelf} />}
       {units.length > 0 && <ShelfUnits units={units} now={context.now} undo={undoPositionsAction} />}

@@ -34,6 +34,11 @@ function Rows({ caption, rows, labels }: { caption: string; rows: readonly Compa
   return (
     <table className="cmpt">
       <caption className="vh">{caption}</caption>
+      <colgroup>
+        <col className="c0" />
+        <col />
+        <col />
+      </colgroup>
       <thead className="vh">
         <tr>
           <th scope="col">Value</th>

@@ -32,7 +32,7 @@ function Drawn({ side: { preamp, state, letter }, label, against }: { side: Comp
         <span className="rv" aria-hidden="true">
           <b className="on">{letter}</b>
         </span>
-        {label}
+        {label === letter ? <span className="vh">{label}</span> : label}
       </figcaption>
       {state ? (
         <FittedPanel preamp={preamp} present={null} target={state} comparedWith={against ?? state} compact initialWidth={LIKELY_WIDTH} />

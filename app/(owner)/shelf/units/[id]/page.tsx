@@ -5,6 +5,7 @@ import { ChangeUnitForm } from '@/components/shelf/change-unit-form'
 import { UnitPositions } from '@/components/shelf/unit-positions'
 import { ownContext } from '@/lib/server/enter'
 import { orNotFound } from '@/lib/server/or-not-found'
+import { sentenceCase } from '@/lib/setups/format'
 import { unitNote, unitTitle } from '@/lib/shelf/format'
 import { getUnit } from '@/lib/shelf/queries'
 import { archiveUnitAction, changeUnitAction, restoreUnitAction, setPositionsAction, undoPositionsAction } from '../actions'
@@ -21,7 +22,7 @@ export default async function UnitPage({ params }: { params: Promise<{ id: strin
         <Link href="/shelf">My sheets</Link> / {unit.archived ? 'Put away' : 'Your preamp'}
       </p>
       <h1>{unitTitle(unit)}</h1>
-      <p className="lead">{[unitNote(unit), unit.board?.name].filter(Boolean).join(', ')}</p>
+      <p className="lead">{sentenceCase([unitNote(unit), unit.board?.name].filter(Boolean).join(', '))}</p>
       {preamp && preamp.controls.length > 0 && <UnitPositions unit={unit} preamp={preamp} now={context.now} setPositions={setPositionsAction} undo={undoPositionsAction} />}
       <section className="two part" aria-labelledby="about">
         <h2 id="about">About it</h2>
