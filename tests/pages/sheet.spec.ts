@@ -62,7 +62,7 @@ test('two switches that exclude each other say which to turn first', async ({ pa
 })
 
 test('after the moves the next revision asks for none, and the one before can still be read', async ({ page, request }) => {
-  await page.goto((await makeSheet(request, CHECKS.changes)).path)
+  await open(page, (await makeSheet(request, CHECKS.changes)).path)
   await page.getByRole('button', { name: 'I have moved them' }).click()
   await expect(page.getByRole('heading', { level: 1 })).toHaveText('It suits. Leave every switch where it is.')
   await expect(page.getByText('revision B').first()).toBeVisible()
@@ -74,7 +74,7 @@ test('after the moves the next revision asks for none, and the one before can st
 
 test('a new code opens the sheet, the old one no longer', async ({ page, request }) => {
   const { path, number } = await makeSheet(request, CHECKS.limit)
-  await page.goto(path)
+  await open(page, path)
   await page.getByRole('button', { name: 'Make a new code' }).click()
   await expect(page).not.toHaveURL(path)
   await expect(page).toHaveURL(/\/sheets\/[^/]+$/)
@@ -87,14 +87,14 @@ test('a new code opens the sheet, the old one no longer', async ({ page, request
 test('the link is copied', async ({ page, request, context, baseURL }) => {
   await context.grantPermissions(['clipboard-read', 'clipboard-write'])
   const { path } = await makeSheet(request, CHECKS.limit)
-  await page.goto(path)
+  await open(page, path)
   await page.getByRole('button', { name: 'Copy the link' }).click()
   await expect(page.getByRole('status').filter({ hasText: 'Copied' })).toBeVisible()
   expect(await page.evaluate(() => navigator.clipboard.readText())).toBe(`${baseURL}${path}`)
 })
 
 test('an open verdict asks for its number first, and takes it', async ({ page, request }) => {
-  await page.goto((await makeSheet(request, CHECKS.open)).path)
+  await open(page, (await makeSheet(request, CHECKS.open)).path)
   await expect(page.getByRole('heading', { level: 1 })).toHaveText('We cannot say yet.')
   await expect(page.getByRole('heading', { name: 'Output of the Brightwater No. 3' })).toBeVisible()
   await expect(page.getByText('Do not measure the coil: a meter can wreck it.')).toBeVisible()
@@ -127,11 +127,11 @@ test('another kind of cartridge gets an answer and no figure', async ({ page, re
 
 test('an answer is changed where it was given, and the sheet keeps its number', async ({ page, request }) => {
   const { path, number, code } = await makeSheet(request, CHECKS.changes)
-  await page.goto(path)
+  await open(page, path)
   await page.getByRole('link', { name: 'Enter it: Inductance' }).click()
   await expect(page).toHaveURL(/\/check\/cartridge\?/)
   expect(new URL(page.url()).searchParams.get('sheet')).toBe(code)
-  await page.goto(path)
+  await open(page, path)
   await page.getByRole('link', { name: 'Start from this sheet' }).click()
   await expect(page).toHaveURL(/\/check\/cartridge\?/)
   const answers = new URL(page.url()).searchParams
